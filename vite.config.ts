@@ -1,0 +1,65 @@
+/// <reference types="vitest/config" />
+import { defineConfig, type Plugin } from "vite";
+import { VitePWA } from "vite-plugin-pwa";
+import { manifest } from "./manifest.config.ts";
+
+/**
+ * The policy of the built page. It stands in the page because a static host may not let us set
+ * headers; the dev server injects inline styles, so it is added to builds only.
+ */
+const CONTENT_SECURITY_POLICY = [
+  "default-src 'none'",
+  "script-src 'self'",
+  "style-src 'self'",
+  "img-src 'self' blob:",
+  "connect-src 'self'",
+  "manifest-src 'self'",
+  "worker-src 'self'",
+  "base-uri 'none'",
+  "form-action 'none'",
+  "require-trusted-types-for 'script'",
+  "trusted-types fadewright-worker",
+].join("; ");
+
+const contentSecurityPolicy: Plugin = {
+  name: "content-security-policy",
+  apply: "build",
+  transformIndexHtml: () => [
+    {
+      tag: "meta",
+      attrs: { "http-equiv": "Content-Security-Policy", content: CONTENT_SECURITY_POLICY },
+      injectTo: "head-prepend",
+    },
+  ],
+};
+
+export default defineConfig({
+  // Relative, so that the built folder works from any sub-path of any static host.
+  base: "./",
+  oxc: { jsx: { runtime: "automatic", importSource: "preact" } },
+  build: {
+    target: ["chrome111", "safari16.4", "firefox115"],
+    modulePreload: { polyfill: false },
+    assetsInlineLimit: 0,
+    reportCompressedSize: false,
+  },
+  plugins: [
+    contentSecurityPolicy,
+    VitePWA({
+      strategies: "injectManifest",
+      srcDir: "sw",
+      filename: "sw.ts",
+      injectRegister: false,
+      includeManifestIcons: false,
+      manifest,
+      injectManifest: { globPatterns: ["**/*.{html,js,css,svg,png,webmanifest}"] },
+    }),
+  ],
+  test: {
+    environment: "node",
+    include: ["tests/**/*.test.{ts,tsx}"],
+    setupFiles: ["tests/setup.ts"],
+    reporters: ["default", ["json", { outputFile: "test-results/unit.json" }]],
+    env: { TZ: "UTC", LC_ALL: "C" },
+  },
+});
