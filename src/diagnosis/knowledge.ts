@@ -44,7 +44,7 @@ export interface Check extends Step {
 export interface Remedy extends Step {
   /** True where it restores audio without curing anything (a spare, a cable). */
   readonly isWorkaround: boolean;
-  /** Probability that it restores audio, under each hypothesis. 0…1 */
+  /** Probability that it restores audio; a hypothesis not in the map is not cured. 0…1 */
   readonly cures: ReadonlyMap<string, number>;
   /** The check that shows whether it helped. */
   readonly provedBy: string;
@@ -55,6 +55,8 @@ export interface Knowledge {
   readonly hypotheses: readonly Cause[];
   readonly checks: readonly Check[];
   readonly remedies: readonly Remedy[];
+  /** How often a report is wrong, so that nothing tried counts as proof. 0…0.5 */
+  readonly floor: number;
   /** Time until audio is back when nothing on the list has helped. [s], > 0 */
   readonly fallbackSeconds: number;
 }

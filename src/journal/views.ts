@@ -62,7 +62,10 @@ export interface FaultView {
 
 export interface TimelineEntry {
   readonly record: JournalRecord;
+  /** By itself, or with the fault or mark that it belongs to. */
   readonly isWithdrawn: boolean;
+  /** Ids of the withdrawals of this very record that stand: withdrawing them restores it. */
+  readonly withdrawals: readonly string[];
 }
 
 export interface ShowView {

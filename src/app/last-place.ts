@@ -1,0 +1,59 @@
+import { effect } from "@preact/signals";
+import type { NavigationModel } from "../models/navigation-model.ts";
+import { parseHash } from "../models/route.ts";
+import type { Keep } from "../models/surroundings.ts";
+
+const PLACE_KEY = "place";
+const SCROLL_KEY = "scroll";
+const REST_MS = 250;
+
+/** The address to start with: the one asked for, else the place where the user was. */
+export function restorePlace(keep: Keep): void {
+  const kept = keep.read(PLACE_KEY);
+  if (location.hash.length <= 2 && kept !== null) history.replaceState(null, "", kept);
+}
+
+/**
+ * Keeps place and scroll where a killed app finds them, and gives each place its scroll back.
+ * `isReady` turns true once the screen has its content and can be scrolled.
+ */
+export function followPlace(
+  navigation: NavigationModel,
+  keep: Keep,
+  isReady: { readonly value: boolean },
+): void {
+  history.scrollRestoration = "manual";
+  const scrolls = new Map<string, number>();
+  const stored = keep.read(SCROLL_KEY)?.split(" ") ?? [];
+  if (stored[0] !== undefined) scrolls.set(stored[0], Number(stored[1]) || 0);
+  // A sum keeps its scroll while its fields change.
+  const placeOf = (hash: string): string => hash.split("?")[0] ?? hash;
+  let here = placeOf(navigation.hash.value);
+  let timer: ReturnType<typeof setTimeout> | undefined;
+  const note = (): void => {
+    clearTimeout(timer);
+    scrolls.set(here, Math.round(scrollY));
+    keep.write(SCROLL_KEY, `${here} ${Math.round(scrollY)}`);
+  };
+  addEventListener(
+    "scroll",
+    () => {
+      clearTimeout(timer);
+      timer = setTimeout(note, REST_MS);
+    },
+    { passive: true },
+  );
+  addEventListener("visibilitychange", () => {
+    if (document.visibilityState === "hidden") note();
+  });
+  effect(() => {
+    const hash = navigation.hash.value;
+    // Opening "mark" marks: it must never be what a restart returns to.
+    if (parseHash(hash).place !== "mark") keep.write(PLACE_KEY, hash);
+    if (!isReady.value) return;
+    const next = placeOf(hash);
+    clearTimeout(timer);
+    here = next;
+    requestAnimationFrame(() => scrollTo(0, scrolls.get(next) ?? 0));
+  });
+}

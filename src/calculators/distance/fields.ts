@@ -1,0 +1,84 @@
+import type { NumberField } from "../field.ts";
+
+const DISTANCE = { quantity: "length", min: 0.1, max: 2000, step: 1.25, stepIs: "ratio" } as const;
+
+/** The inputs of the distance calculator, in the order of its screen. */
+export const DISTANCE_FIELDS = {
+  fromM: { id: "fromM", ...DISTANCE, initial: 30 },
+  toM: { id: "toM", ...DISTANCE, initial: 15 },
+  frequencyMhz: {
+    id: "frequencyMhz",
+    quantity: "frequency",
+    min: 25,
+    max: 7200,
+    initial: 550,
+    step: 10,
+    stepIs: "sum",
+  },
+  exponent: {
+    id: "exponent",
+    quantity: "exponent",
+    min: 1,
+    max: 6,
+    initial: 2,
+    step: 0.1,
+    stepIs: "sum",
+  },
+  wishedGainDb: {
+    id: "wishedGainDb",
+    quantity: "level-change",
+    min: -60,
+    max: 60,
+    initial: 6,
+    step: 1,
+    stepIs: "sum",
+  },
+} as const satisfies Readonly<Record<string, NumberField>>;
+
+export type DistanceFieldId = keyof typeof DISTANCE_FIELDS;
+export const DISTANCE_FIELD_IDS = Object.keys(DISTANCE_FIELDS) as readonly DistanceFieldId[];
+
+/** A published exponent to start from; any other may be typed. */
+export interface ExponentPreset {
+  readonly id: string;
+  readonly value: number;
+  readonly source: string;
+  /** "exact" follows from the definition; "second-hand" was read in a copy, not in the source itself. */
+  readonly standing: "exact" | "second-hand";
+}
+
+const P1238 = "Rec. ITU-R P.1238-11, Table 2, coefficient α";
+
+/** P.1238 coefficients read at github.com/aajuvonen/octave-rxt (model_p1238.m), 2026-12-01. */
+export const EXPONENT_PRESETS = [
+  {
+    id: "free-space",
+    value: 2,
+    source: "Rec. ITU-R P.525-5, free-space basic transmission loss",
+    standing: "exact",
+  },
+  {
+    id: "office-los",
+    value: 1.46,
+    source: `${P1238}: office, line of sight, 2 to 27 m, 0.3 to 83.5 GHz`,
+    standing: "second-hand",
+  },
+  {
+    id: "office-nlos",
+    value: 2.46,
+    source: `${P1238}: office, no line of sight, 4 to 30 m, 0.3 to 82 GHz`,
+    standing: "second-hand",
+  },
+  {
+    id: "industrial-los",
+    value: 2.31,
+    source: `${P1238}: industrial, line of sight, 2 to 101 m, 0.625 to 70.28 GHz`,
+    standing: "second-hand",
+  },
+  {
+    id: "industrial-nlos",
+    value: 3.79,
+    source: `${P1238}: industrial, no line of sight, 5 to 108 m, 0.625 to 70.28 GHz`,
+    standing: "second-hand",
+  },
+] as const satisfies readonly ExponentPreset[];

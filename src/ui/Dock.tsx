@@ -1,0 +1,43 @@
+import type { ComponentChildren } from "preact";
+import type { AppModels } from "../models/app-models.ts";
+import type { tabOf } from "../models/route.ts";
+import { noticeText, SHELL_TEXT } from "./text/shell.ts";
+
+const PLACES = ["fault", "calculators", "rig", "log"] as const;
+
+/** Always at the thumb: the last acknowledgement, the mark button, the four places. */
+export function Dock(props: {
+  models: AppModels;
+  tab: ReturnType<typeof tabOf>;
+  children: ComponentChildren;
+}) {
+  const { journal, notices, fault } = props.models;
+  const notice = notices.notice.value;
+  const timeZone = journal.openShow.value?.timeZone ?? "UTC";
+  const hasOpenFault = fault.openFaults.value.length > 0;
+  return (
+    <div class="dock">
+      {/* Present from the start and empty: a live region that appears with its text is not read out. */}
+      <p class="notice number" role="status">
+        {notice && noticeText(notice, timeZone)}
+      </p>
+      <div class="dock-actions">
+        {props.children}
+        <button type="button" class="main" onClick={() => void fault.markDropout()}>
+          {hasOpenFault ? SHELL_TEXT.markAgain : SHELL_TEXT.mark}
+        </button>
+      </div>
+      <nav class="places" aria-label={SHELL_TEXT.places}>
+        {PLACES.map((place) => (
+          <a
+            key={place}
+            href={`#/${place}`}
+            aria-current={props.tab === place ? "page" : undefined}
+          >
+            {SHELL_TEXT[place]}
+          </a>
+        ))}
+      </nav>
+    </div>
+  );
+}

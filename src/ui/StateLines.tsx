@@ -1,0 +1,59 @@
+import type { AppModels } from "../models/app-models.ts";
+import { MishapLine } from "./MishapLine.tsx";
+import { failureText, newerText, notStoredText, SHELL_TEXT, setAsideText } from "./text/shell.ts";
+
+/** What the user has to know about the log or the version; nothing while all is well. */
+export function StateLines({ models }: { models: AppModels }) {
+  const { journal, offline } = models;
+  const failure = journal.failure.value;
+  const unsaved = journal.unsaved.value;
+  const setAside = journal.setAside.value.length;
+  const newer = journal.newerCount.value;
+  return (
+    <>
+      <MishapLine models={models} />
+      {journal.phase.value === "loading" && <p class="soft">{SHELL_TEXT.reading}</p>}
+      {journal.isReplaced.value && <Line text={SHELL_TEXT.replaced} isWarning />}
+      {failure !== null && (
+        <div class="line-note warning" role="alert">
+          <p>
+            {unsaved.length > 0 && <strong>{notStoredText(unsaved.length)} </strong>}
+            {failureText(failure)}
+          </p>
+          <button type="button" onClick={() => void journal.retry()}>
+            {SHELL_TEXT.retry}
+          </button>
+          {unsaved.length > 0 && (
+            <button
+              type="button"
+              onClick={() => void models.log.shareFile("unsaved", JSON.stringify(unsaved, null, 1))}
+            >
+              {SHELL_TEXT.copyUnsaved}
+            </button>
+          )}
+        </div>
+      )}
+      {setAside > 0 && <Line text={setAsideText(setAside)} hasLink />}
+      {newer > 0 && <Line text={newerText(newer)} />}
+      {offline.canOffer.value && (
+        <div class="line-note">
+          <p>{SHELL_TEXT.update}</p>
+          <button type="button" onClick={offline.takeUpdate}>
+            {SHELL_TEXT.updateNow}
+          </button>
+        </div>
+      )}
+      {offline.isTakenElsewhere.value && <Line text={SHELL_TEXT.takenElsewhere} />}
+    </>
+  );
+}
+
+function Line(props: { text: string; isWarning?: boolean; hasLink?: boolean }) {
+  return (
+    <p class={props.isWarning ? "line-note warning" : "line-note"}>
+      <span>
+        {props.text} {props.hasLink && <a href="#/settings">{SHELL_TEXT.toSettings}</a>}
+      </span>
+    </p>
+  );
+}

@@ -1,0 +1,32 @@
+import type { AppModels } from "../../models/app-models.ts";
+import { MarkStrip } from "../parts/MarkStrip.tsx";
+import { FAULT_TEXT } from "../text/fault.ts";
+import { FaultGone } from "./FaultGone.tsx";
+import { GivenAnswers } from "./GivenAnswers.tsx";
+import { MomentPicker } from "./MomentPicker.tsx";
+import { StepCard } from "./StepCard.tsx";
+import { Suspects } from "./Suspects.tsx";
+
+/** One fault: the next step, what it could be, and what has been answered. */
+export function FaultTrace({ models }: { models: AppModels }) {
+  const { fault: model, journal } = models;
+  const traced = model.traced.value;
+  if (traced === null) return journal.phase.value === "loading" ? null : <FaultGone />;
+  const { fault, show } = traced;
+  return (
+    <div class="stack">
+      <div class="row nowrap">
+        <div class="grow">
+          <MarkStrip marks={fault.marks} timeZone={show.timeZone} />
+        </div>
+        <a class="button" href={`#/fault/${fault.id}/marks`}>
+          {FAULT_TEXT.marks}
+        </a>
+      </div>
+      <MomentPicker fault={model} />
+      <StepCard model={model} fault={fault} timeZone={show.timeZone} />
+      <Suspects model={model} />
+      <GivenAnswers model={model} fault={fault} />
+    </div>
+  );
+}

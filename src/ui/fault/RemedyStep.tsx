@@ -1,0 +1,39 @@
+import type { FaultModel } from "../../models/fault-model.ts";
+import { TRIAL_RESULTS } from "../../models/vocabulary.ts";
+import { FAULT_TEXT, RESULT_TEXT, secondsText } from "../text/fault.ts";
+import { REMEDY_TEXT } from "../text/remedies.ts";
+import { CautionList } from "./CautionList.tsx";
+
+export function RemedyStep({ model, id }: { model: FaultModel; id: string }) {
+  const remedy = model.knowledge().remedies.find((candidate) => candidate.id === id);
+  const text = REMEDY_TEXT[id];
+  if (!remedy || !text) return null;
+  return (
+    <>
+      <h2 class="question">{text.title}</h2>
+      <p>
+        {text.how} <span class="soft">({secondsText(remedy.seconds)})</span>
+      </p>
+      <CautionList ids={remedy.cautions} />
+      <p>{FAULT_TEXT.howDidItGo}</p>
+      <div class="answers two">
+        {remedy.isWorkaround ? (
+          <>
+            <button type="button" onClick={() => void model.tried(id, "cured")}>
+              {FAULT_TEXT.isBack}
+            </button>
+            <button type="button" onClick={() => void model.tried(id, "no-change")}>
+              {FAULT_TEXT.isNotBack}
+            </button>
+          </>
+        ) : (
+          TRIAL_RESULTS.map((result) => (
+            <button key={result} type="button" onClick={() => void model.tried(id, result)}>
+              {RESULT_TEXT[result]}
+            </button>
+          ))
+        )}
+      </div>
+    </>
+  );
+}

@@ -1,0 +1,75 @@
+import type { FaultView } from "../../journal/views.ts";
+import type { FaultModel } from "../../models/fault-model.ts";
+import { CANT_TELL } from "../../models/vocabulary.ts";
+import { CAUSE_TEXT } from "../text/causes.ts";
+import { ENDING_TEXT, FAULT_TEXT, waitText, whyText } from "../text/fault.ts";
+import { timeOf } from "../text/format.ts";
+import { CheckStep } from "./CheckStep.tsx";
+import { RemedyStep } from "./RemedyStep.tsx";
+
+/** The one next step, with its answers and the ways round it. */
+export function StepCard(props: { model: FaultModel; fault: FaultView; timeZone: string }) {
+  const { model, fault } = props;
+  if (fault.verdict !== null) return <Verdict {...props} verdict={fault.verdict} />;
+  const advice = model.advice.value;
+  const step = model.step.value;
+  return (
+    <section class="card stack" aria-label={FAULT_TEXT.next}>
+      {step === null && advice !== null && (
+        <>
+          <p>{advice.kind === "wait" ? waitText(advice.until) : FAULT_TEXT.exhausted}</p>
+          {model.moment.value === "live" && <p>{FAULT_TEXT.fallback}</p>}
+        </>
+      )}
+      {step?.kind === "check" && <CheckStep model={model} id={step.id} />}
+      {step?.kind === "remedy" && <RemedyStep model={model} id={step.id} />}
+      {advice?.kind === "step" && step === model.steps.value[0] && (
+        <p class="soft">{whyText(advice.reason, (cause) => CAUSE_TEXT[cause]?.name ?? cause)}</p>
+      )}
+      <div class="pair">
+        {step?.kind === "check" && (
+          <button type="button" onClick={() => void model.answer(step.id, CANT_TELL)}>
+            {FAULT_TEXT.cantTell}
+          </button>
+        )}
+        {step !== null && (
+          <>
+            <button type="button" onClick={() => void model.skip(step)}>
+              {FAULT_TEXT.skip}
+            </button>
+            <a class="button" href={`#/fault/${fault.id}/steps`}>
+              {FAULT_TEXT.other}
+            </a>
+          </>
+        )}
+        <a class="button" href="#/fault">
+          {FAULT_TEXT.notNow}
+        </a>
+        <a class="button" href={`#/fault/${fault.id}/close`}>
+          {FAULT_TEXT.cured}
+        </a>
+      </div>
+    </section>
+  );
+}
+
+function Verdict(props: {
+  model: FaultModel;
+  timeZone: string;
+  verdict: NonNullable<FaultView["verdict"]>;
+}) {
+  const { verdict, timeZone, model } = props;
+  const causes = verdict.causes.map((cause) => CAUSE_TEXT[cause]?.name ?? cause).join(" + ");
+  return (
+    <section class="card stack" aria-label={FAULT_TEXT.closeTitle}>
+      <h2 class="number">
+        {timeOf(verdict.at, timeZone)} {ENDING_TEXT[verdict.ending]}
+      </h2>
+      <p>{causes === "" ? FAULT_TEXT.closeCauseUnknown : causes}</p>
+      {verdict.note !== "" && <p>{verdict.note}</p>}
+      <button type="button" onClick={() => void model.withdraw(verdict.record)}>
+        {FAULT_TEXT.reopen}
+      </button>
+    </section>
+  );
+}

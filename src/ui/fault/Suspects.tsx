@@ -1,0 +1,64 @@
+import type { FaultModel } from "../../models/fault-model.ts";
+import { CAUSE_TEXT } from "../text/causes.ts";
+import { CHECK_TEXT } from "../text/checks.ts";
+import { FAULT_TEXT, RESULT_TEXT, STRENGTH_TEXT } from "../text/fault.ts";
+import { decibels } from "../text/format.ts";
+import { REMEDY_TEXT } from "../text/remedies.ts";
+
+const SHOWN = 3;
+
+/** The three leading suspects; each unfolds into the evidence for and against it, in decibels. */
+export function Suspects({ model }: { model: FaultModel }) {
+  return (
+    <section>
+      <h2>{FAULT_TEXT.suspects}</h2>
+      <div class="stack">
+        {model.suspects.value.slice(0, SHOWN).map((suspect) => (
+          <details key={suspect.cause} class="suspect">
+            <summary>
+              <span class="row">
+                <strong>{CAUSE_TEXT[suspect.cause]?.name ?? suspect.cause}</strong>
+                <span class="soft">
+                  {STRENGTH_TEXT[suspect.strength]}, {suspect.percent} %
+                </span>
+              </span>
+              <span class="track" aria-hidden="true">
+                <span class="fill" style={{ width: `${Math.round(suspect.probability * 100)}%` }} />
+              </span>
+            </summary>
+            <div class="evidence">
+              <p class="soft">{CAUSE_TEXT[suspect.cause]?.plain}</p>
+              <Evidence model={model} cause={suspect.cause} />
+            </div>
+          </details>
+        ))}
+      </div>
+    </section>
+  );
+}
+
+function Evidence({ model, cause }: { model: FaultModel; cause: string }) {
+  const weights = model.weights(cause);
+  if (weights.length === 0) return <p>{FAULT_TEXT.noEvidence}</p>;
+  return (
+    <>
+      <ul>
+        {weights.map(({ kind, id, outcome, weightDb }) => (
+          <li key={`${kind}.${id}`}>
+            <span>
+              {kind === "check"
+                ? (CHECK_TEXT[id]?.outcomes[outcome] ?? outcome)
+                : `${REMEDY_TEXT[id]?.title ?? id}: ${resultText(outcome)}`}
+            </span>
+            <span class="number">{decibels(weightDb)}</span>
+          </li>
+        ))}
+      </ul>
+      <p class="soft">{FAULT_TEXT.evidenceUnit}</p>
+    </>
+  );
+}
+
+function resultText(outcome: string): string {
+  return Object.entries(RESULT_TEXT).find(([result]) => result === outcome)?.[1] ?? outcome;
+}

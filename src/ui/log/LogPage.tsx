@@ -1,0 +1,113 @@
+import type { ShowView, TimelineEntry } from "../../journal/views.ts";
+import type { AppModels } from "../../models/app-models.ts";
+import type { LogModel } from "../../models/log-model.ts";
+import { DraftField } from "../parts/DraftField.tsx";
+import { dateOf, timeOf } from "../text/format.ts";
+import { LOG_TEXT } from "../text/log.ts";
+import { REPORT_WORDING } from "../text/report.ts";
+import { SHELL_TEXT } from "../text/shell.ts";
+
+/** The show's timeline, latest entry first, and the way out of the phone for it. */
+export function LogPage({ models }: { models: AppModels }) {
+  const model = models.log;
+  const show = model.show.value;
+  if (show === null)
+    return (
+      <div class="stack">
+        <p>{LOG_TEXT.purpose}</p>
+        <a class="button wide" href="#/show">
+          {LOG_TEXT.openShow}
+        </a>
+      </div>
+    );
+  const name = show.name || SHELL_TEXT.unnamedShow;
+  return (
+    <div class="stack">
+      <div class="row">
+        <p>
+          <strong>{name}</strong>
+          {show.place !== "" && <span> · {show.place}</span>}
+          <br />
+          <span class="soft number">{dateOf(show.openedAt, show.timeZone)}</span>
+        </p>
+        <button type="button" onClick={() => void model.share(name, REPORT_WORDING)}>
+          {LOG_TEXT.share}
+        </button>
+      </div>
+      {model.shownText.value !== null && <CopyByHand model={model} text={model.shownText.value} />}
+      <form
+        class="stack"
+        onSubmit={(event) => {
+          event.preventDefault();
+          void model.addNote();
+        }}
+      >
+        <div class="row nowrap">
+          <div class="grow">
+            <DraftField
+              id="note"
+              label={LOG_TEXT.note}
+              placeholder={LOG_TEXT.notePlaceholder}
+              draft={model.note}
+              lines="some"
+              problem={model.isNoteTooLong.value ? LOG_TEXT.noteTooLong : null}
+            />
+          </div>
+          <button type="submit" class="tall">
+            {LOG_TEXT.addNote}
+          </button>
+        </div>
+      </form>
+      <ol class="entries" reversed>
+        {[...show.timeline].reverse().map((entry) => (
+          <Entry key={entry.record.id} entry={entry} show={show} model={model} />
+        ))}
+      </ol>
+    </div>
+  );
+}
+
+function Entry(props: { entry: TimelineEntry; show: ShowView; model: LogModel }) {
+  const { show, model } = props;
+  const { record, isWithdrawn, withdrawals } = props.entry;
+  const line = model.lineOf(props.entry, show, REPORT_WORDING);
+  return (
+    <li class="row nowrap">
+      <span>
+        <span class="soft number">{timeOf(record.at, show.timeZone)}</span>
+        <br />
+        <span class={isWithdrawn ? "withdrawn" : undefined}>{line}</span>
+        {isWithdrawn && <span class="soft"> ({LOG_TEXT.withdrawn})</span>}
+        {record.type === "sum.kept" && !isWithdrawn && (
+          <>
+            {" "}
+            <a href={`#/calculators/${record.body.calculator}?${record.body.query}`}>
+              {LOG_TEXT.reopenSum}
+            </a>
+          </>
+        )}
+      </span>
+      {record.type !== "show.opened" && (!isWithdrawn || withdrawals.length > 0) && (
+        <button
+          type="button"
+          aria-label={`${isWithdrawn ? LOG_TEXT.restore : LOG_TEXT.withdraw}: ${line}`}
+          onClick={() => void (isWithdrawn ? model.restore(record.id) : model.withdraw(record.id))}
+        >
+          {isWithdrawn ? LOG_TEXT.restore : LOG_TEXT.withdraw}
+        </button>
+      )}
+    </li>
+  );
+}
+
+function CopyByHand({ model, text }: { model: LogModel; text: string }) {
+  return (
+    <section class="card stack">
+      <label for="copy-by-hand">{LOG_TEXT.copyByHand}</label>
+      <textarea id="copy-by-hand" readOnly value={text} rows={8} />
+      <button type="button" onClick={model.hideText}>
+        {LOG_TEXT.close}
+      </button>
+    </section>
+  );
+}

@@ -1,0 +1,3 @@
+import { RELEASE } from "./release.ts";
+
+export const text = `late part of ${RELEASE}`;

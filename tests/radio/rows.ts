@@ -1,0 +1,17 @@
+import { filesBelow, readText } from "../architecture/tree.ts";
+
+/** A published figure that a radio function is held against; inputs and quantity carry their units. */
+export interface Row {
+  readonly id: string;
+  readonly quantity: string;
+  readonly input: Readonly<Record<string, number>>;
+  readonly expected: number;
+  readonly tolerance: number;
+  readonly toleranceReason: string;
+  readonly basis: string;
+  readonly source: Readonly<Record<string, string>>;
+}
+
+export const ROWS: readonly Row[] = filesBelow("shared/vectors")
+  .filter((path) => path.endsWith(".json"))
+  .flatMap((path) => JSON.parse(readText(path)) as Row[]);
