@@ -73,6 +73,11 @@ export default defineConfig({
       injectRegister: false,
       includeManifestIcons: false,
       manifest,
+      integration: {
+        configureCustomSWViteBuild: (worker) => {
+          worker.logLevel = "warn";
+        },
+      },
       // The manifest is not named here: the plugin adds it by itself, and would twice.
       injectManifest: {
         rollupFormat: "iife",

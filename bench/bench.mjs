@@ -61,9 +61,10 @@ if (!options.itself && !existsSync(`${ours.folder}/index.html`)) {
 
 console.log(`Cold start without network, ${ours.name} beside floor. In ms from the navigation's start.
 Each start: new browser process, copy of a profile in which the page is installed, server stopped.
-"ratio" is the median over neighbouring pairs. The browser's own start is left out. The throttle slows the page's main thread, not the service worker.
+The browser's own start is left out. The throttle slows the page's main thread, not the worker.
 A "tap" is a click made by script, once for each frame until it takes effect.
-${cpus().length} cores, load ${loadavg()[0].toFixed(1)}, ${runs} starts each after one that does not count.
+"ratio" is the median over pairs of neighbouring starts. On a busy machine trust it, not the ms.
+${cpus().length} cores, load ${loadavg()[0].toFixed(1)}, ${runs} counted starts of each page and rate, after one that is not.
 `);
 
 await buildFloor(FLOOR.folder);

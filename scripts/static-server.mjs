@@ -36,7 +36,8 @@ export function createStaticServer(folder, intercept = () => false) {
     const file = join(root, path.endsWith("/") ? `${path}index.html` : path);
     const isInside = path !== "" && file.startsWith(root + sep);
     const found = isInside ? await stat(file).catch(nullIfMissing) : null;
-    if (found?.isDirectory()) return response.writeHead(301, { location: `${encodeURI(path)}/` }).end();
+    if (found?.isDirectory())
+      return response.writeHead(301, { location: `${encodeURI(path)}/` }).end();
     if (!found?.isFile()) return response.writeHead(404).end();
     const content = await readFile(file);
     response.writeHead(200, {
@@ -51,9 +52,10 @@ export function createStaticServer(folder, intercept = () => false) {
     /** Paths asked for, in order. */
     requests,
 
+    /** Without a slash at the end. */
     get url() {
       if (port === undefined) throw new RangeError("url: the server has never been started");
-      return `http://${HOST}:${port}/`;
+      return `http://${HOST}:${port}`;
     },
 
     /** @param wantedPort  0: any that is free. @throws Error with code EADDRINUSE */
@@ -86,7 +88,7 @@ export function createStaticServer(folder, intercept = () => false) {
 /** Empty if the address makes no sense. */
 function pathOf(request) {
   try {
-    const path = decodeURIComponent(new URL(request.url, `http://${HOST}`).pathname);
+    const path = decodeURIComponent(new URL(`http://${HOST}${request.url}`).pathname);
     return path.includes("\0") ? "" : path;
   } catch (error) {
     if (error instanceof URIError || error.code === "ERR_INVALID_URL") return "";

@@ -1,6 +1,7 @@
 import { v7 as newId } from "uuid";
 import type { Surroundings } from "../models/surroundings.ts";
-import { createKeptTexts } from "./kept-texts.ts";
+import { createKeptStore } from "../storage/kept-store.ts";
+import { createKeptTexts, createLocalTexts } from "./kept-texts.ts";
 import { createScreenLock } from "./screen-lock.ts";
 import { shareFile, shareText } from "./sharing.ts";
 
@@ -8,11 +9,14 @@ const DEVICE_KEY = "device";
 const NUDGE_MS = 30;
 
 /** The phone as the models see it. The only place with clock, ids, randomness and navigator. */
-export function createBrowserSurroundings(): Surroundings {
-  const keep = createKeptTexts();
-  const device = keep.read(DEVICE_KEY) ?? newId().slice(-12);
-  keep.write(DEVICE_KEY, device);
+export function createBrowserSurroundings(): Surroundings & { loadKept(): Promise<void> } {
+  const emergencyKeep = createLocalTexts();
+  const keep = createKeptTexts(emergencyKeep, createKeptStore());
+  const device = emergencyKeep.read(DEVICE_KEY) ?? newId().slice(-12);
+  emergencyKeep.write(DEVICE_KEY, device);
   return {
+    emergencyKeep,
+    loadKept: keep.load,
     nowMs: () => Date.now(),
     newId: () => newId(),
     timeZone: () => Intl.DateTimeFormat().resolvedOptions().timeZone,

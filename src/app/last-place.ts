@@ -7,10 +7,22 @@ const PLACE_KEY = "place";
 const SCROLL_KEY = "scroll";
 const REST_MS = 250;
 
-/** The address to start with: the one asked for, else the place where the user was. */
-export function restorePlace(keep: Keep): void {
-  const kept = keep.read(PLACE_KEY);
-  if (location.hash.length <= 2 && kept !== null) history.replaceState(null, "", kept);
+/**
+ * Goes to the place where the user was, unless the address names one by itself (a link, a shortcut,
+ * a reload). The function that it returns is for the moment when the database, which may know
+ * better, has been read: it does the same again, unless the user has moved on.
+ */
+export function restorePlace(keep: Keep, navigation: NavigationModel): () => void {
+  if (navigation.hash.value.length > 2) return () => {};
+  const restore = (): void => {
+    const kept = keep.read(PLACE_KEY);
+    if (kept !== null) navigation.replace(parseHash(kept));
+  };
+  restore();
+  const restored = navigation.hash.value;
+  return () => {
+    if (navigation.hash.value === restored) restore();
+  };
 }
 
 /**

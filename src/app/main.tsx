@@ -27,14 +27,13 @@ import { startOffline } from "./start-offline.ts";
 const ASKED_KEY = "asked-to-persist";
 
 const surroundings = createBrowserSurroundings();
-restorePlace(surroundings.keep);
-
 const mishap = createMishapModel();
 addEventListener("error", ({ error, message }) => mishap.report(error ?? message));
 addEventListener("unhandledrejection", ({ reason }) => mishap.report(reason));
 
 const journal = createJournalModel(createIdbStore(), surroundings);
 const navigation = createNavigationModel(createAddressBar());
+const restoreAgain = restorePlace(surroundings.keep, navigation);
 const notices = createNoticeModel();
 const settings = createSettingsModel(surroundings);
 let known: Knowledge | undefined;
@@ -66,11 +65,11 @@ effect(() => {
   document.documentElement.dataset["theme"] = settings.theme.value;
 });
 effect(() => surroundings.keepAwake(fault.openFaults.value.length > 0));
-followPlace(
-  navigation,
-  surroundings.keep,
-  computed(() => journal.phase.value !== "loading"),
-);
+void surroundings.loadKept().then(() => {
+  restoreAgain();
+  const isReady = computed(() => journal.phase.value !== "loading");
+  followPlace(navigation, surroundings.keep, isReady);
+});
 
 // An acknowledgement belongs to the screen on which it was given.
 effect(() => {

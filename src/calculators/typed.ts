@@ -13,9 +13,9 @@ const IN_THREES = /^[+-]?[1-9]\d{0,2}(?:[.,'\u2019\s]\d{3})+(?:[.,]\d*)?[^\d.,]*
 
 /**
  * Reads what a person typed or pasted into a field. Never throws and never guesses: a mark that may
- * stand for decimals or for thousands is asked about. "614,400" is asked about too, since kilohertz
- * are written so; but in "614.400 MHz", the usual way to write a carrier, the point stands for
- * decimals, because the thousandfold lies outside the field.
+ * stand for decimals or for thousands is asked about where both readings fit the field: "1.500" as a
+ * length. Where the thousandfold lies outside the field the mark stands for decimals: in "614.400"
+ * or "614,400", the usual ways to write a carrier in megahertz.
  *
  * @param text        As typed: point or comma, a unit behind it or none, spaces around it
  * @param field       Says the quantity and the range
@@ -35,8 +35,7 @@ export function readTyped(text: string, field: NumberField, lengthUnit: LengthUn
   // The exponent is applied by the number parser: 1.001 GHz is 1001 MHz, not 1000.9999999999999.
   // Adding 0 makes 0 of -0.
   const value = Number(`${digits.replace(",", ".")}e${unit.powerOfTen}`) * unit.factor + 0;
-  if (inThrees && (digits.includes(",") || isInside(value * 1000, field)))
-    return { kind: "ambiguous-separator" };
+  if (inThrees && isInside(value * 1000, field)) return { kind: "ambiguous-separator" };
   if (isInside(value, field)) return { kind: "ok", value };
   return { kind: value < field.min ? "below-range" : "above-range" };
 }

@@ -78,12 +78,13 @@ export function expectedSeconds(
   fallbackSeconds: number,
 ): number {
   // A remedy's rate only ever falls, so the last one worked out bounds it from above and most need
-  // not be worked out again (lazy greedy: M. Minoux, Lecture Notes in Control 7, 1978).
+  // not be worked out again (lazy greedy: M. Minoux, Lecture Notes in Control and Information
+  // Sciences 7, 1978; from memory, to be verified).
   const bounds = new Float64Array(remedies.length).fill(Number.POSITIVE_INFINITY);
   let left = masses;
   let mass = masses.reduce((sum, one) => sum + one, 0);
   let seconds = 0;
-  for (;;) {
+  for (let tried = 0; tried < remedies.length; tried++) {
     let best = -1;
     let bestRate = mass / fallbackSeconds;
     remedies.forEach((remedy, at) => {
@@ -96,10 +97,11 @@ export function expectedSeconds(
       }
     });
     const remedy = remedies[best];
-    if (remedy === undefined) return seconds + mass * fallbackSeconds;
-    bounds[best] = 0;
+    if (remedy === undefined) break;
+    bounds[best] = Number.NEGATIVE_INFINITY;
     seconds += remedy.step.seconds * mass;
     mass -= bestRate * remedy.step.seconds;
     left = massesAfter(remedy, left);
   }
+  return seconds + mass * fallbackSeconds;
 }

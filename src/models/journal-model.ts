@@ -54,7 +54,7 @@ export function createJournalModel(store: JournalStore, surroundings: Surroundin
   let loading: Promise<void> | undefined;
   let lastClock: string | null = null;
 
-  const slot = createEmergencySlot(surroundings.keep);
+  const slot = createEmergencySlot(surroundings.emergencyKeep);
   const stampContext = { device: surroundings.device, newId: surroundings.newId };
   const add = (fresh: readonly JournalRecord[]): void => {
     const known = new Set(records.value.map((record) => record.id));

@@ -1,4 +1,4 @@
-import { type ReadonlySignal, signal } from "@preact/signals";
+import { computed, type ReadonlySignal, signal } from "@preact/signals";
 import type { LengthUnit } from "../calculators/field.ts";
 import type { StorageUse, Surroundings } from "./surroundings.ts";
 
@@ -24,26 +24,30 @@ export function createSettingsModel({
   askToPersist,
   storageUse,
 }: Surroundings): SettingsModel {
-  const stored = <T extends string>(key: string, known: readonly T[], otherwise: T): T =>
-    known.find((value) => value === keep.read(key)) ?? otherwise;
-  const theme = signal<Theme>(stored("theme", THEMES, "blackout"));
-  const lengthUnit = signal<LengthUnit>(stored("length-unit", LENGTH_UNITS, "m"));
+  const setting = <T extends string>(key: string, known: readonly T[], otherwise: T) => {
+    const chosen = signal<T | null>(null);
+    return {
+      value: computed(
+        () => chosen.value ?? known.find((value) => value === keep.read(key)) ?? otherwise,
+      ),
+      choose: (next: T): void => {
+        chosen.value = next;
+        keep.write(key, next);
+      },
+    };
+  };
+  const theme = setting<Theme>("theme", THEMES, "blackout");
+  const lengthUnit = setting<LengthUnit>("length-unit", LENGTH_UNITS, "m");
   const storage = signal<StorageUse | null>(null);
   const look = async (): Promise<void> => {
     storage.value = await storageUse();
   };
   return {
-    theme,
-    lengthUnit,
+    theme: theme.value,
+    lengthUnit: lengthUnit.value,
     storage,
-    setTheme: (next) => {
-      theme.value = next;
-      keep.write("theme", next);
-    },
-    setLengthUnit: (next) => {
-      lengthUnit.value = next;
-      keep.write("length-unit", next);
-    },
+    setTheme: theme.choose,
+    setLengthUnit: lengthUnit.choose,
     lookAtStorage: look,
     askToPersist: async () => {
       await askToPersist();

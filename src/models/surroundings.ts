@@ -12,6 +12,8 @@ export interface Surroundings {
   /** Names this browser on this phone in the journal. */
   readonly device: string;
   readonly keep: Keep;
+  /** For what the database would not take: a keep that does not need the database. */
+  readonly emergencyKeep: Keep;
   /** A light acknowledgement in the hand, where the phone has it. */
   nudge(): void;
   /** Asks the browser not to clear the journal by itself. Null: it can't say. */
@@ -25,6 +27,7 @@ export interface Surroundings {
 
 /** Short texts that survive a killed app. Not for the journal. */
 export interface Keep {
+  /** Reactive: what the database knows better arrives a moment after the start. */
   read(key: string): string | null;
   /** Null removes it. False: the phone did not keep it. */
   write(key: string, text: string | null): boolean;

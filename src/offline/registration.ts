@@ -5,7 +5,7 @@ import { isFinal, isSettled, untilState } from "./worker-state.ts";
 export interface OfflineState {
   /** "ready" only after the worker has found every file of the version in its store. */
   readonly readiness: "unsupported" | "preparing" | "ready" | "failed";
-  /** "taken-elsewhere": another window has changed the version; this one runs the older on. */
+  /** "taken-elsewhere": the version was changed, but not from here; this window runs the older on. */
   readonly update: "none" | "waiting" | "taken-elsewhere";
   /** Null until the worker has named it. */
   readonly version: string | null;
@@ -16,14 +16,14 @@ export interface Offline {
   onChange(hear: () => void): void;
   /** Registers the worker after the page has loaded. To be called once. */
   start(): void;
-  /** Changes to the waiting version, then loads this window anew. Without one, does nothing. */
+  /** Changes to the newer version and loads this window anew. Without one, does nothing. */
   takeUpdate(): void;
   /** Never called by itself: the look costs traffic, and the user decides when. */
   checkForUpdate(): Promise<UpdateCheck>;
 }
 
 /** "refused-by-lock": there is a newer version, and a show is open. */
-export type UpdateCheck = "found" | "none" | "refused-by-lock" | "unreachable";
+type UpdateCheck = "found" | "none" | "refused-by-lock" | "unreachable";
 
 /** The worker's answer on what the app is started from. */
 interface Completeness {
@@ -63,12 +63,12 @@ export function createOffline({ reload }: { readonly reload: () => void }): Offl
   };
 
   const register = async (): Promise<void> => {
+    const isAsked = ours !== null;
     // "none": else the browser may compare with its own cached copy of the worker for a day.
     const workbox = new Workbox(workerAddress(), { updateViaCache: "none" });
     const registered = await workbox.register();
     if (registered === undefined) throw new RangeError("start: called twice");
     registration = registered;
-    const isControlled = ours !== null;
     // A window that was loaded past the worker has no controller to compare with.
     ours ??= registered.active;
     // Workbox's own "waiting" event stops after the first update that another window has set off.
@@ -77,7 +77,7 @@ export function createOffline({ reload }: { readonly reload: () => void }): Offl
       if (installing !== null) void untilState(installing, isSettled).then(lookForWaiting);
     });
     lookForWaiting();
-    if (isControlled) return;
+    if (isAsked) return;
     const first = registered.installing ?? registered.waiting;
     // A registration comes before the files do. Only an activated worker has stored them.
     if (registered.active === null && first !== null) await untilState(first, isFinal);
@@ -114,8 +114,8 @@ export function createOffline({ reload }: { readonly reload: () => void }): Offl
     takeUpdate() {
       const waiting = registration?.waiting ?? null;
       if (waiting === null) {
-        const { active = null } = registration ?? {};
-        if (isHeld && active !== null) void messageSW(active, { type: "release" }).then(reload);
+        if (state.update === "taken-elsewhere") return reload();
+        if (isHeld && ours !== null) void messageSW(ours, { type: "release" }).then(reload);
         return;
       }
       // Asked again, because a busy browser can leave a worker waiting; but loaded once.

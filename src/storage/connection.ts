@@ -1,14 +1,15 @@
 import { type DBSchema, type IDBPDatabase, type IDBPTransaction, openDB } from "idb";
 import type { ShowLock, StoreFailure } from "../journal/store.ts";
 import { givenUp, reasonOf } from "./failure.ts";
-import { DATABASE_NAME, DATABASE_VERSION, LOCK, RECORDS, SET_ASIDE } from "./names.ts";
+import { DATABASE_NAME, DATABASE_VERSION, KEPT, LOCK, RECORDS, SET_ASIDE } from "./names.ts";
 
 export interface JournalDatabase extends DBSchema {
   [RECORDS]: { key: string; value: unknown };
   [SET_ASIDE]: { key: number; value: unknown };
   [LOCK]: { key: string; value: ShowLock };
+  [KEPT]: { key: string; value: string };
 }
-type Store = typeof RECORDS | typeof SET_ASIDE | typeof LOCK;
+type Store = typeof RECORDS | typeof SET_ASIDE | typeof LOCK | typeof KEPT;
 export type Transaction<S extends Store> = IDBPTransaction<JournalDatabase, S[], "readwrite">;
 
 export interface ConnectionOptions {
@@ -61,6 +62,7 @@ export function createConnection(options: ConnectionOptions): Connection {
             database.createObjectStore("records");
             database.createObjectStore("set-aside", { autoIncrement: true });
             database.createObjectStore("lock");
+            database.createObjectStore("kept");
           }
         },
         blocked: () => giveUp("blocked"),

@@ -10,5 +10,7 @@ export const SET_ASIDE = "set-aside";
 /** One row under LOCK_KEY while a show is open. */
 export const LOCK = "lock";
 export const LOCK_KEY = "show";
+/** Short texts under their key: place, drafts, settings. */
+export const KEPT = "kept";
 /** Channel on which the windows of the app tell each other what they have stored. */
 export const CHANNEL_NAME = "fadewright-journal";

@@ -72,7 +72,7 @@ export function nameOffences(paths: readonly string[]): string[] {
 const lastWord = (part: string): string =>
   (part.split(".")[0] ?? part).toLowerCase().split("-").at(-1) ?? "";
 
-export const MOST_LINES = 250;
+const MOST_LINES = 250;
 
 export function lengthOffences(files: readonly SourceFile[]): string[] {
   return files.flatMap(({ path, source }) => {

@@ -58,8 +58,8 @@ test("a hand-damaged record is set aside, counted and handed over; the rest is s
         open.onsuccess = () => {
           const transaction = open.result.transaction("records", "readwrite");
           const store = transaction.objectStore("records");
-          store.put({ id: "0-damaged", v: 1, type: "note.added", body: { text: 7 } });
-          store.put({ id: "0-later", v: 99, type: "from.the.future", body: {} });
+          store.put({ id: "x", v: 1, type: "note.added", body: { text: 7 } }, "0-damaged");
+          store.put({ id: "y", v: 99, type: "from.the.future", body: {} }, "0-later");
           transaction.oncomplete = () => {
             open.result.close();
             resolve();

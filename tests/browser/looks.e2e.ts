@@ -28,7 +28,7 @@ async function everyScreen(
   await look("trace-fresh");
   await answerFirst(page);
   await answerFirst(page);
-  await page.locator(".suspect summary").first().click();
+  await page.locator(".unfold summary").first().click();
   await look("trace");
   await page.getByRole("link", { name: "Something else" }).click();
   await look("steps");

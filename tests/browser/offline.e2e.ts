@@ -24,7 +24,7 @@ test.describe("use without network", () => {
     await expect(field(page, "late")).toHaveText("late part of first");
     await page.reload();
     await expectReady(page, "first");
-    await page.goto(`${site.url}?from=icon#/log`);
+    await page.goto(`${site.url}/?from=icon#/log`);
     await expectReady(page, "first");
   });
 

@@ -48,7 +48,7 @@ test.describe("an open show", () => {
 
   test("lets the very first version in", async ({ page, site }) => {
     // A page of the same origin that has no worker.
-    await page.goto(`${site.url}sw.js`);
+    await page.goto(`${site.url}/sw.js`);
     await lockShow(page);
     await page.goto(site.url);
     await expectReady(page, "first");

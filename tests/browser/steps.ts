@@ -50,11 +50,11 @@ export async function tour(page: Page): Promise<void> {
   await openShow(page);
   await addLink(page);
   await mark(page);
-  const before = await page.locator(".suspect strong").allTextContents();
+  const before = await page.locator(".unfold strong").allTextContents();
   const given = await answerFirst(page);
   await answerFirst(page);
   await answerFirst(page);
-  expect(await page.locator(".suspect strong").allTextContents()).not.toEqual(before);
+  expect(await page.locator(".unfold strong").allTextContents()).not.toEqual(before);
 
   await page.getByRole("link", { name: "Links and place" }).click();
   await page.getByRole("button", { name: "Lead vocal" }).click();

@@ -32,10 +32,10 @@ test("the show is shared as text that a stranger can read", async ({ page, site,
   await expect(page.locator(".dock").getByRole("status")).toContainText("Copied");
   const text = await page.evaluate(() => navigator.clipboard.readText());
   expect(text).toContain(`${SHOW.name}, ${SHOW.place}`);
-  expect(text).toContain("Lead vocal: handheld, 606.125 MHz.");
+  expect(text).toMatch(/Lead vocal: handheld, 606\.125\sMHz\./);
   expect(text).toMatch(/Fault 1: .+\n- Dropout at \d\d:\d\d:\d\d: Lead vocal; Down left\./);
   expect(text).toContain("Worked around");
-  expect(text).toContain("+12.0 dB");
+  expect(text).toMatch(/\+12\.0\sdB/);
 });
 
 test("everything works from the first visit on, once the page says that it is ready", async ({
@@ -86,8 +86,8 @@ test("nothing acknowledged is lost when the browser is killed between two taps",
   const second = await openBrowser();
   await second.page.goto(site.url);
   await expect(stepTitle(second.page)).toHaveText(asked);
-  await expect(second.page.getByText(given.title)).toBeVisible();
-  await expect(second.page.getByText(given.answer, { exact: true })).toBeVisible();
+  await expect(second.page.locator(".entries")).toContainText(given.title);
+  await expect(second.page.locator(".entries")).toContainText(given.answer);
   await mark(second.page, 2);
   await second.kill();
 

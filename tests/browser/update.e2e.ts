@@ -56,7 +56,7 @@ test.describe("a new version", () => {
     expect(await cacheNames(again.page)).toHaveLength(1);
   });
 
-  test("is seen and taken in a window that was loaded past the worker", async ({
+  test("does not wait for a window that was loaded past the worker, nor loads it anew", async ({
     page,
     site,
     pages,
@@ -70,8 +70,11 @@ test.describe("a new version", () => {
     await expectReady(page, "first");
     expect(await page.evaluate(() => navigator.serviceWorker.controller)).toBeNull();
     await site.publish(pages.second);
-    await check(page, "found");
     const loads = countLoads(page);
+    await check(page, "found");
+    await expect(field(page, "update")).toHaveText("taken-elsewhere");
+    await expectReady(page, "first");
+    expect(loads()).toBe(0);
     await press(page, "take");
     await expectReady(page, "second");
     expect(loads()).toBe(1);

@@ -19,7 +19,7 @@ interface Manifest {
 }
 
 /** "192x192" of a PNG, from its header. @throws RangeError if it is none. */
-export function pngSize(bytes: Buffer): string {
+function pngSize(bytes: Buffer): string {
   const isPng = bytes.subarray(1, 4).toString("latin1") === "PNG" && bytes.length > 24;
   if (!isPng) throw new RangeError("pngSize: bytes: not a PNG");
   return `${bytes.readUInt32BE(16)}x${bytes.readUInt32BE(20)}`;

@@ -10,7 +10,7 @@ function parse(html: string) {
 }
 
 /** Addresses of the scripts and stylesheets that a page loads, in order. */
-export function loadedBy(html: string): { scripts: string[]; styles: string[] } {
+function loadedBy(html: string): { scripts: string[]; styles: string[] } {
   const page = parse(html);
   const addresses = (selector: string, name: string) =>
     [...page.querySelectorAll(selector)].map((one) =>

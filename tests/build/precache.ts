@@ -3,7 +3,7 @@ import { childOf, childrenOf, dottedName, nodesOf, textOf } from "../architectur
 import type { BuiltFile } from "./built.ts";
 
 /** Paths in the list of files that the built service worker keeps: its `{ url, revision }` objects. */
-export function precachedBy(worker: string): string[] {
+function precachedBy(worker: string): string[] {
   return nodesOf({ path: "sw.js", source: worker }).flatMap((node) => {
     if (node.type !== "ObjectExpression") return [];
     const fields = new Map(

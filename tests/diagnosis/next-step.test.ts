@@ -82,6 +82,16 @@ describe("a check or a remedy", () => {
     expect(advice).toMatchObject({ others: [{ id: "one" }, { id: "all" }] });
   });
 
+  it("between checks that tell the same takes the one that disturbs least", () => {
+    const one = twoCauses(10);
+    const checks = ["loud", "quiet"].flatMap((id) =>
+      one.checks.map(
+        (same) => ({ ...same, id, disruption: id === "loud" ? "one-link" : "none" }) as const,
+      ),
+    );
+    expect(step(adviseNext({ ...one, checks }, NOTHING, "live"))).toBe("quiet");
+  });
+
   it("names the two probable causes that the check tells apart, never none-of-these", () => {
     const known = knowledge({
       hypotheses: [cause("a", 3), cause("twin", 3), cause("b", 2), cause("none-of-these", 4)],

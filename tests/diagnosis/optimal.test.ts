@@ -6,18 +6,19 @@ import { cause, check, knowledge, NOTHING, remedy } from "./small-knowledge.ts";
 
 /** Small enough for every policy to be searched: 3 causes, 2 checks, 3 remedies. */
 const CAUSES = ["a", "b", "c"] as const;
-const seconds = fc.integer({ min: 20, max: 300 });
+const seconds = fc.integer({ min: 100, max: 600 });
 const share = fc.integer({ min: 5, max: 95 }).map((percent) => percent / 100);
+const sure = fc.integer({ min: 60, max: 95 }).map((percent) => percent / 100);
 const two = share.map((first) => [first, 1 - first]);
 
 const instance: fc.Arbitrary<Knowledge> = fc
   .record({
     rates: fc.tuple(...CAUSES.map(() => fc.integer({ min: 1, max: 20 }))),
     checks: fc.array(
-      fc.record({ seconds: fc.integer({ min: 3, max: 60 }), a: two, b: two, c: two }),
+      fc.record({ seconds: fc.integer({ min: 3, max: 30 }), a: two, b: two, c: two }),
       { minLength: 2, maxLength: 2 },
     ),
-    remedies: fc.tuple(...CAUSES.map(() => fc.record({ seconds, main: share, side: share }))),
+    remedies: fc.tuple(...CAUSES.map(() => fc.record({ seconds, main: sure, side: share }))),
   })
   .map(({ rates, checks, remedies }) =>
     knowledge({
@@ -27,8 +28,8 @@ const instance: fc.Arbitrary<Knowledge> = fc
       ),
       remedies: remedies.map(({ seconds, main, side }, at) =>
         remedy(`remedy-${at}`, seconds, {
-          [CAUSES[at] ?? "a"]: Math.max(main, side),
-          [CAUSES[(at + 1) % 3] ?? "a"]: Math.min(main, side) / 2,
+          [CAUSES[at] ?? "a"]: main,
+          [CAUSES[(at + 1) % 3] ?? "a"]: side / 4,
         }),
       ),
       fallbackSeconds: 1800,
@@ -134,8 +135,14 @@ describe("the advice, against exhaustive search on small random faults", () => {
     expect(mean(rows.map(({ own }) => own))).toBeLessThan(mean(rows.map(({ fixed }) => fixed)));
   });
 
+  it("takes less time on average than the best order without a question", () => {
+    const unasked = instances.map((known) => ({ ...known, checks: [] }));
+    const without = unasked.map((known) => optimum(known, start(known)));
+    expect(mean(rows.map(({ own }) => own))).toBeLessThan(mean(without));
+  });
+
   // No outside figure: one check of look-ahead is a heuristic, this says how good it has to stay.
-  it("stays within five per cent of the optimum on average", () => {
-    expect(mean(rows.map(({ own, best }) => own / best))).toBeLessThan(1.05);
+  it("stays within one per cent of the optimum on average", () => {
+    expect(mean(rows.map(({ own, best }) => own / best))).toBeLessThan(1.01);
   });
 });

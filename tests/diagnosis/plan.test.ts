@@ -1,7 +1,9 @@
+import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import type { Remedy } from "../../src/diagnosis/knowledge.ts";
 import { adviseNext } from "../../src/diagnosis/next-step.ts";
 import { expectedSeconds, tablesOf } from "../../src/diagnosis/plan.ts";
+import { SEEDED } from "./real-knowledge.ts";
 import { cause, knowledge, NOTHING, remedy } from "./small-knowledge.ts";
 
 /** The examples' costs are taken as minutes: the advice counts seconds, and one more or less is a tie. */
@@ -104,6 +106,32 @@ describe("the order of remedies", () => {
     // By hand: 300 s for one chance in ten saves 100 s.
     expect(expected(known)).toBeCloseTo(1000, 9);
     expect(adviseNext(known, NOTHING, "off-air")).toEqual({ kind: "exhausted" });
+  });
+
+  it("always ends, between nothing and the fallback's time, whatever rounding does", () => {
+    const share = fc.double({ min: 0, max: 1, noNaN: true });
+    const boxes = fc.array(
+      fc.record({ share, cured: share, minutes: fc.integer({ min: 1, max: 90 }) }),
+      {
+        minLength: 1,
+        maxLength: 8,
+      },
+    );
+    fc.assert(
+      fc.property(boxes, (list) => {
+        const known = knowledge({
+          hypotheses: list.map((box, at) => cause(`cause-${at}`, box.share)),
+          remedies: list.map((box, at) =>
+            remedy(`remedy-${at}`, box.minutes, { [`cause-${at}`]: box.cured, "cause-0": 1 }),
+          ),
+          fallbackSeconds: 1800,
+        });
+        const sum = list.reduce((total, box) => total + box.share, 0);
+        expect(expected(known)).toBeGreaterThanOrEqual(-1e-9);
+        expect(expected(known)).toBeLessThanOrEqual(1800 * sum + 1e-9);
+      }),
+      SEEDED,
+    );
   });
 
   it("scales with the masses", () => {

@@ -1,8 +1,12 @@
-import type { Check, Evidence, Knowledge, Remedy } from "../../src/diagnosis/knowledge.ts";
+import type { Cause, Check, Evidence, Knowledge, Remedy } from "../../src/diagnosis/knowledge.ts";
 
 export const NOTHING: Evidence = { answers: [], trials: [], skipped: [] };
 
-export const cause = (id: string, ratePerHour: number) => ({ id, family: "any", ratePerHour });
+export const cause = (id: string, ratePerHour: number): Cause => ({
+  id,
+  family: "any",
+  ratePerHour,
+});
 
 export function check(
   id: string,

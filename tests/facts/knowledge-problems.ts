@@ -108,7 +108,7 @@ function meanRow(knowledge: Knowledge, check: Knowledge["checks"][number], cause
 }
 
 /** The greatest weight that any outcome of any check gives the cause. [deciban] */
-export function bestConfirmationDb(knowledge: Knowledge, cause: string): number {
+function bestConfirmationDb(knowledge: Knowledge, cause: string): number {
   const others = knowledge.hypotheses.map(({ id }) => id).filter((id) => id !== cause);
   const weights = knowledge.checks.flatMap((check) => {
     const rest = meanRow(knowledge, check, others);
@@ -179,6 +179,10 @@ function textProblems(raw: Elicited, wording: Wording): string[] {
     wording.remedies,
   );
   compare("caution", [...new Set(cautions)], wording.cautions);
+  for (const [id, { how }] of Object.entries({ ...wording.checks, ...wording.remedies })) {
+    if (how.split(/[.?!](?:\s|$)/).filter(Boolean).length > 2)
+      problems.push(`${id}: how is too long`);
+  }
   for (const { id, outcomes } of raw.checks) {
     const text = wording.checks[id];
     if (text === undefined) continue;

@@ -105,6 +105,18 @@ describe("the knowledge of the app", () => {
     for (const { id, cautions } of steps) expect(cautions, id).toContain("hearing");
   });
 
+  it("calls nothing legal or safe", () => {
+    const said = JSON.stringify(WORDING);
+    expect(said.length).toBeGreaterThan(10_000);
+    expect(said).not.toMatch(/\b(legal|legally|safe|safely|harmless|no risk)\b/i);
+  });
+
+  it("defers to competent people and local rules where work can hurt", () => {
+    for (const id of ["height", "mains", "licence"]) {
+      expect(CAUTION_TEXT[id]?.text).toMatch(/competent|trained|local codes|licence/);
+    }
+  });
+
   it("has two work-arounds that may be done in live", () => {
     const ids = ELICITED.remedies.filter(({ isWorkaround }) => isWorkaround);
     expect(ids.map(({ id }) => id)).toEqual(["hand-over-spare", "go-to-cable"]);
@@ -312,6 +324,14 @@ describe("the validator", () => {
       ({ wording }) => {
         const text = wording.checks["twist"];
         if (text) text.question = "one two three four five six seven eight nine ten eleven twelve";
+      },
+    ],
+    [
+      "a how of three sentences",
+      "retune: how is too long",
+      ({ wording }) => {
+        const text = wording.remedies["retune"];
+        if (text) text.how = "Look. Listen. Tune to 2.4 GHz.";
       },
     ],
     [

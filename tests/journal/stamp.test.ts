@@ -15,7 +15,6 @@ const context = {
   lastClock: null,
 };
 const note: Entry = { type: "note.added", body: { text: "t" } };
-const opening: Entry = { type: "show.opened", body: BODY["show.opened"] };
 
 describe("stampEntry", () => {
   it.each(RECORD_TYPES)("makes of %s a record that reads back the same", (type) => {

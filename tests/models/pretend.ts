@@ -43,6 +43,14 @@ export function pretendSurroundings(kept = new Map<string, string>()): Surroundi
   const clock = { nowMs: Date.UTC(2026, 11, 1, 20, 41, 7) };
   const shared: string[] = [];
   let count = 0;
+  const keep = {
+    read: (key: string) => kept.get(key) ?? null,
+    write: (key: string, text: string | null) => {
+      if (text === null) kept.delete(key);
+      else kept.set(key, text);
+      return true;
+    },
+  };
   return {
     clock,
     kept,
@@ -54,14 +62,8 @@ export function pretendSurroundings(kept = new Map<string, string>()): Surroundi
     },
     timeZone: () => "UTC",
     device: "phone-a",
-    keep: {
-      read: (key) => kept.get(key) ?? null,
-      write: (key, text) => {
-        if (text === null) kept.delete(key);
-        else kept.set(key, text);
-        return true;
-      },
-    },
+    keep,
+    emergencyKeep: keep,
     nudge: () => {},
     askToPersist: async () => true,
     storageUse: async () => ({ isPersistent: true, usedBytes: 1000 }),

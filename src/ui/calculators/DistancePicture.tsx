@@ -4,7 +4,7 @@ import { DISTANCE_TEXT } from "../text/calculators.ts";
 import { decibels, lengthIn } from "../text/format.ts";
 
 const WIDTH = 320;
-const HEIGHT = 96;
+const HEIGHT = 78;
 const LEFT = 8;
 const RIGHT = WIDTH - 8;
 const TOP = 20;

@@ -14,7 +14,7 @@ export function Suspects({ model }: { model: FaultModel }) {
       <h2>{FAULT_TEXT.suspects}</h2>
       <div class="stack">
         {model.suspects.value.slice(0, SHOWN).map((suspect) => (
-          <details key={suspect.cause} class="suspect">
+          <details key={suspect.cause} class="unfold">
             <summary>
               <span class="row">
                 <strong>{CAUSE_TEXT[suspect.cause]?.name ?? suspect.cause}</strong>

@@ -26,7 +26,7 @@ export const FAULT_TEXT = {
   against: "Speaks against it",
   noEvidence: "Nothing answered yet moves this one.",
   evidenceUnit: "Evidence in decibels: +10 dB makes it ten times likelier against the rest.",
-  otherTitle: "Steps that can be done now",
+  otherTitle: "Other steps",
   otherNone: "Nothing else can be done at this moment of the show.",
   exhausted:
     "Every step has been done or skipped. Close the fault with what you know, or take an answer back.",
