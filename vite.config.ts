@@ -2,6 +2,7 @@
 import { fileURLToPath } from "node:url";
 import { defineConfig, type Plugin } from "vite";
 import { VitePWA } from "vite-plugin-pwa";
+import { expertise } from "./expertise.plugin.ts";
 import { manifest } from "./manifest.config.ts";
 
 /**
@@ -34,22 +35,6 @@ const contentSecurityPolicy: Plugin = {
   ],
 };
 
-/**
- * The files in shared/knowledge carry a reason and a source beside every row, for those who correct
- * them. The app reads the numbers only, so a build leaves the words out.
- */
-const knowledgeWithoutReasons: Plugin = {
-  name: "knowledge-without-reasons",
-  apply: "build",
-  enforce: "pre",
-  transform(code, id) {
-    if (!/[\\/]shared[\\/]knowledge[\\/][^\\/]+\.json$/.test(id)) return null;
-    const drop = (key: string, value: unknown): unknown =>
-      key === "because" || key === "source" ? undefined : value;
-    return { code: JSON.stringify(JSON.parse(code, drop)), map: null };
-  },
-};
-
 export default defineConfig({
   // Relative, so that the built folder works from any sub-path of any static host.
   base: "./",
@@ -64,7 +49,7 @@ export default defineConfig({
   },
   plugins: [
     contentSecurityPolicy,
-    knowledgeWithoutReasons,
+    expertise(),
     VitePWA({
       strategies: "injectManifest",
       // Absolute: the browser tests build a page of their own with this worker and these settings.
@@ -81,7 +66,7 @@ export default defineConfig({
       // The manifest is not named here: the plugin adds it by itself, and would twice.
       injectManifest: {
         rollupFormat: "iife",
-        globPatterns: ["**/*.{html,js,css,svg,png}"],
+        globPatterns: ["**/*.{html,js,css,json,svg,png}"],
       },
     }),
   ],

@@ -1,12 +1,10 @@
 import "../ui/styles.css";
 import { computed, effect, untracked } from "@preact/signals";
 import { render } from "preact";
-import { fromElicited } from "../diagnosis/elicit.ts";
-import type { Knowledge } from "../diagnosis/knowledge.ts";
-import { ELICITED } from "../facts/knowledge.ts";
 import type { AppModels } from "../models/app-models.ts";
 import { createCloseModel } from "../models/close-model.ts";
 import { createDistanceModel } from "../models/distance-model.ts";
+import { createExpertiseModel } from "../models/expertise-model.ts";
 import { createFaultModel } from "../models/fault-model.ts";
 import { createJournalModel } from "../models/journal-model.ts";
 import { createLogModel } from "../models/log-model.ts";
@@ -22,6 +20,7 @@ import { Shell } from "../ui/Shell.tsx";
 import { createAddressBar } from "./address-bar.ts";
 import { createBrowserSurroundings } from "./browser-surroundings.ts";
 import { followPlace, restorePlace } from "./last-place.ts";
+import { readExpertise } from "./read-expertise.ts";
 import { startOffline } from "./start-offline.ts";
 
 const ASKED_KEY = "asked-to-persist";
@@ -36,18 +35,15 @@ const navigation = createNavigationModel(createAddressBar());
 const restoreAgain = restorePlace(surroundings.keep, navigation);
 const notices = createNoticeModel();
 const settings = createSettingsModel(surroundings);
-let known: Knowledge | undefined;
-const knowledge = (): Knowledge => {
-  known ??= fromElicited(ELICITED);
-  return known;
-};
-const fault = createFaultModel({ journal, navigation, notices, surroundings, knowledge });
+const expertise = createExpertiseModel(readExpertise);
+const fault = createFaultModel({ journal, navigation, notices, surroundings, expertise });
 const models: AppModels = {
   mishap,
   journal,
   navigation,
   notices,
   settings,
+  expertise,
   fault,
   offline: createOfflineModel(startOffline(), journal),
   close: createCloseModel(fault, navigation, notices, surroundings),
@@ -87,3 +83,4 @@ effect(() => {
   untracked(() => void settings.askToPersist());
 });
 void journal.load();
+void expertise.load();

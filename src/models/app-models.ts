@@ -1,5 +1,6 @@
 import type { CloseModel } from "./close-model.ts";
 import type { DistanceModel } from "./distance-model.ts";
+import type { ExpertiseModel } from "./expertise-model.ts";
 import type { FaultModel } from "./fault-model.ts";
 import type { JournalModel } from "./journal-model.ts";
 import type { LogModel } from "./log-model.ts";
@@ -18,6 +19,7 @@ export interface AppModels {
   readonly mishap: MishapModel;
   readonly notices: NoticeModel;
   readonly settings: SettingsModel;
+  readonly expertise: ExpertiseModel;
   readonly offline: OfflineModel;
   readonly show: ShowModel;
   readonly fault: FaultModel;

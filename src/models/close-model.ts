@@ -61,7 +61,8 @@ export function createCloseModel(
     () => own.value.remedy ?? (own.value.remedy === null ? null : (helped.value[0] ?? null)),
   );
   const isWorkaround = computed(
-    () => fault.knowledge().remedies.find((r) => r.id === remedy.value)?.isWorkaround ?? false,
+    () =>
+      fault.knowledge.value?.remedies.find(({ id }) => id === remedy.value)?.isWorkaround ?? false,
   );
   const ending = computed<Ending>(
     () =>

@@ -11,10 +11,12 @@ import {
 } from "../diagnosis/weights.ts";
 import type { Ending, Moment, StagePlace, TrialResult } from "../journal/records.ts";
 import type { FaultView, ShowView } from "../journal/views.ts";
+import type { ExpertiseModel } from "./expertise-model.ts";
 import type { JournalModel, Make } from "./journal-model.ts";
 import type { NavigationModel } from "./navigation-model.ts";
 import type { NoticeModel } from "./notice-model.ts";
 import type { Surroundings } from "./surroundings.ts";
+import type { Words } from "./words.ts";
 
 /** A suspect as the screen shows it: never more precise than it is known. */
 export interface SuspectView {
@@ -36,7 +38,9 @@ export interface FaultModel {
   readonly step: ReadonlySignal<StepName | null>;
   /** Every step that is still to be had in this moment, the advised one first. */
   readonly steps: ReadonlySignal<readonly StepName[]>;
-  readonly knowledge: () => Knowledge;
+  /** Null while what the fault finder knows has not been read. */
+  readonly knowledge: ReadonlySignal<Knowledge | null>;
+  readonly words: ReadonlySignal<Words>;
   weights(cause: string): readonly EvidenceWeight[];
   markDropout(): Promise<void>;
   setMoment(moment: Moment): Promise<void>;
@@ -62,10 +66,10 @@ export function createFaultModel(parts: {
   navigation: NavigationModel;
   notices: NoticeModel;
   surroundings: Surroundings;
-  /** Made on first use: reading it takes time that a cold start does not have. */
-  knowledge: () => Knowledge;
+  expertise: ExpertiseModel;
 }): FaultModel {
-  const { journal, navigation, notices, surroundings, knowledge } = parts;
+  const { journal, navigation, notices, surroundings } = parts;
+  const { knowledge, words } = parts.expertise;
   const show = journal.openShow;
   const openFaults = computed(() => (show.value?.faults ?? []).filter((f) => f.verdict === null));
   const traced = computed(() => {
@@ -84,7 +88,9 @@ export function createFaultModel(parts: {
     return { answers: fault.answers, trials: fault.trials, skipped: fault.skipped };
   });
   const advice = computed(() =>
-    traced.value === null ? null : adviseNext(knowledge(), evidence.value, moment.value),
+    traced.value === null || knowledge.value === null
+      ? null
+      : adviseNext(knowledge.value, evidence.value, moment.value),
   );
   const steps = computed<readonly StepName[]>(() => {
     const next = advice.value;
@@ -118,18 +124,22 @@ export function createFaultModel(parts: {
     openFaults,
     traced,
     suspects: computed(() =>
-      suspects(knowledge(), evidence.value).map(({ cause, probability }) => ({
-        cause,
-        probability,
-        strength: strengthWord(probability),
-        percent: roundedPercent(probability),
-      })),
+      knowledge.value === null
+        ? []
+        : suspects(knowledge.value, evidence.value).map(({ cause, probability }) => ({
+            cause,
+            probability,
+            strength: strengthWord(probability),
+            percent: roundedPercent(probability),
+          })),
     ),
     advice,
     step,
     steps,
     knowledge,
-    weights: (cause) => evidenceWeights(knowledge(), evidence.value, cause),
+    words,
+    weights: (cause) =>
+      knowledge.value === null ? [] : evidenceWeights(knowledge.value, evidence.value, cause),
     markDropout: async () => {
       let fault = "";
       const marked = { at: 0, count: 1 };

@@ -1,7 +1,7 @@
 import type { Limits } from "./limits.ts";
 import { requireRange } from "./require-range.ts";
 
-export const J0_ARGUMENT_LIMITS: Limits = { min: 0, max: 6300 };
+const ARGUMENT_LIMITS: Limits = { min: 0, max: 6300 };
 
 /**
  * Bessel function of the first kind and order zero: how a wave that comes from all sides at once
@@ -22,7 +22,7 @@ export const J0_ARGUMENT_LIMITS: Limits = { min: 0, max: 6300 };
  * @checkedBy           j0-at-1, j0-at-5, j0-at-10
  */
 export function besselJ0(x: number): number {
-  requireRange("besselJ0", J0_ARGUMENT_LIMITS, { x });
+  requireRange("besselJ0", ARGUMENT_LIMITS, { x });
   const stepCount = Math.ceil(x / 2 + 6 * Math.cbrt(x) + 8);
   let sum = 0;
   for (let n = 0; n < stepCount; n += 1) sum += Math.cos(x * Math.sin((Math.PI * n) / stepCount));

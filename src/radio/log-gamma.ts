@@ -29,5 +29,11 @@ export function logGamma(z: number): number {
   for (; raised < 10; raised += 1) product *= raised;
   let sum = 0;
   for (const coefficient of [...STIRLING].reverse()) sum = sum / raised ** 2 + coefficient;
-  return (raised - 0.5) * Math.log(raised) - raised + Math.log(2 * Math.PI) / 2 + sum / raised - Math.log(product);
+  return (
+    (raised - 0.5) * Math.log(raised) -
+    raised +
+    Math.log(2 * Math.PI) / 2 +
+    sum / raised -
+    Math.log(product)
+  );
 }

@@ -3,7 +3,7 @@ import type { Limits } from "./limits.ts";
 import { logGamma } from "./log-gamma.ts";
 import { requireRange } from "./require-range.ts";
 
-const STEADY_LIMITS: Limits = { min: 0, max: 26 };
+const STEADY_LIMITS: Limits = { min: 0.01, max: 26 };
 const BOUND_LIMITS: Limits = { min: 1e-6, max: 90 };
 
 /**
@@ -15,7 +15,7 @@ const BOUND_LIMITS: Limits = { min: 1e-6, max: 90 };
  * Assumes: amplitudes in units of the standard deviation of either noise component. Not for: Q₁ itself
  * where it is below 10⁻⁶: it would be lost beside the 1.
  *
- * @param steadyRatio   a, the steady amplitude. [none], 0 to 26
+ * @param steadyRatio   a, the steady amplitude. [none], 0.01 to 26
  * @param boundRatio    b, the bound. [none], 10⁻⁶ to 90
  * @returns             1 − Q₁(a, b), above 0 and at most 1. [none]
  * @throws RangeError   If an input lies outside its range or is NaN.

@@ -3,7 +3,10 @@ import { requireRange } from "./require-range.ts";
 
 /** How far the mean power lies above the level that the receiver needs. */
 export const MARGIN_LIMITS_DB: Limits = { min: -10, max: 100 };
+/** What a margin can be asked for. */
 export const OUTAGE_LIMITS: Limits = { min: 1e-9, max: 0.999 };
+/** Of one branch among several: eight that each fail with 0.9999 fail together with 0.9992. */
+const BRANCH_OUTAGE_LIMITS: Limits = { min: OUTAGE_LIMITS.min, max: 0.9999 };
 
 /**
  * Share of places, or of time while walking, in which the level falls below what the receiver needs:
@@ -37,8 +40,8 @@ export function rayleighOutageProbability(marginDb: number): number {
  *
  * Assumes: as rayleighOutageProbability. Not for: promises: the mean is never known to the last decibel.
  *
- * @param outageProbability  Wished outage. [none], 10⁻⁸⁰ to 0.9999
- * @returns                  Mean power over the needed power. [dB], about −10 to 800
+ * @param outageProbability  Wished outage. [none], 10⁻⁹ to 0.9999
+ * @returns                  Mean power over the needed power. [dB], −10 to 90
  * @throws RangeError        If the outage lies outside its range or is NaN.
  * @accuracy                 exact for the assumptions
  * @source                   as rayleighOutageProbability, solved for the margin
@@ -46,6 +49,6 @@ export function rayleighOutageProbability(marginDb: number): number {
  * @checkedBy                rayleigh-margin-1-percent, rayleigh-margin-0-1-percent
  */
 export function rayleighMarginDb(outageProbability: number): number {
-  requireRange("rayleighMarginDb", OUTAGE_LIMITS, { outageProbability });
+  requireRange("rayleighMarginDb", BRANCH_OUTAGE_LIMITS, { outageProbability });
   return -10 * Math.log10(-Math.log1p(-outageProbability));
 }

@@ -42,5 +42,7 @@ export function selectionMeanGainDb(branchCount: number): number {
  * @checkedBy                selection-gain-1-percent, selection-gain-0-1-percent
  */
 export function selectionDiversityGainDb(outageProbability: number, branchCount: number): number {
-  return selectionMarginDb(outageProbability, 1) - selectionMarginDb(outageProbability, branchCount);
+  return (
+    selectionMarginDb(outageProbability, 1) - selectionMarginDb(outageProbability, branchCount)
+  );
 }

@@ -25,7 +25,9 @@ export function solveRising(
 ): number {
   let { min, max } = limits;
   if (!(valueAt(min) <= wished && valueAt(max) >= wished)) {
-    throw new RangeError(`solveRising: wished must be reached from ${min} to ${max}, got ${wished}`);
+    throw new RangeError(
+      `solveRising: wished must be reached from ${min} to ${max}, got ${wished}`,
+    );
   }
   for (;;) {
     const middle = min + (max - min) / 2;

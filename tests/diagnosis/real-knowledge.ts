@@ -1,9 +1,9 @@
 import fc from "fast-check";
 import { fromElicited } from "../../src/diagnosis/elicit.ts";
 import { CANT_TELL, type Evidence } from "../../src/diagnosis/knowledge.ts";
-import { ELICITED } from "../../src/facts/knowledge.ts";
+import { EXPERTISE } from "../../src/facts/expertise.ts";
 
-export const REAL = fromElicited(ELICITED);
+export const REAL = fromElicited(EXPERTISE.elicited);
 
 export const SEEDED = { seed: 20261201, numRuns: 200 } as const;
 

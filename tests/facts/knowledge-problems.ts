@@ -5,16 +5,10 @@ import {
   MOMENTS,
   NONE_OF_THESE,
 } from "../../src/diagnosis/knowledge.ts";
-import type { CauseText } from "../../src/ui/text/causes.ts";
+import type { Wording as FaultFinderWording } from "../../src/facts/wording.ts";
 import type { CautionText } from "../../src/ui/text/cautions.ts";
-import type { CheckText } from "../../src/ui/text/checks.ts";
-import type { RemedyText } from "../../src/ui/text/remedies.ts";
 
-export interface Wording {
-  readonly causes: Readonly<Record<string, CauseText>>;
-  readonly families: Readonly<Record<string, string>>;
-  readonly checks: Readonly<Record<string, CheckText>>;
-  readonly remedies: Readonly<Record<string, RemedyText>>;
+export interface Wording extends FaultFinderWording {
   readonly cautions: Readonly<Record<string, CautionText>>;
 }
 

@@ -4,20 +4,12 @@ import checksFile from "../../shared/knowledge/checks.json";
 import remediesFile from "../../shared/knowledge/remedies.json";
 import scaleFile from "../../shared/knowledge/scale.json";
 import type { Elicited } from "../../src/diagnosis/elicit.ts";
-import { ELICITED } from "../../src/facts/knowledge.ts";
-import { CAUSE_TEXT, FAMILY_TEXT } from "../../src/ui/text/causes.ts";
+import { EXPERTISE } from "../../src/facts/expertise.ts";
 import { CAUTION_TEXT } from "../../src/ui/text/cautions.ts";
-import { CHECK_TEXT } from "../../src/ui/text/checks.ts";
-import { REMEDY_TEXT } from "../../src/ui/text/remedies.ts";
 import { knowledgeProblems, type Wording } from "./knowledge-problems.ts";
 
-const WORDING: Wording = {
-  causes: CAUSE_TEXT,
-  families: FAMILY_TEXT,
-  checks: CHECK_TEXT,
-  remedies: REMEDY_TEXT,
-  cautions: CAUTION_TEXT,
-};
+const ELICITED = EXPERTISE.elicited;
+const WORDING: Wording = { ...EXPERTISE.wording, cautions: CAUTION_TEXT };
 
 type Writable<T> = { -readonly [K in keyof T]: Writable<T[K]> };
 type Draft = { raw: Writable<Elicited>; wording: Writable<Wording> };

@@ -1,14 +1,15 @@
 import { describe, expect, it } from "vitest";
 import { fromElicited } from "../../src/diagnosis/elicit.ts";
-import { ELICITED } from "../../src/facts/knowledge.ts";
+import { EXPERTISE } from "../../src/facts/expertise.ts";
 import { createCloseModel } from "../../src/models/close-model.ts";
+import { createExpertiseModel } from "../../src/models/expertise-model.ts";
 import { createFaultModel } from "../../src/models/fault-model.ts";
 import { createJournalModel } from "../../src/models/journal-model.ts";
 import { createNavigationModel } from "../../src/models/navigation-model.ts";
 import { createNoticeModel } from "../../src/models/notice-model.ts";
 import { pretendAddress, pretendStore, pretendSurroundings } from "./pretend.ts";
 
-const KNOWLEDGE = fromElicited(ELICITED);
+const KNOWLEDGE = fromElicited(EXPERTISE.elicited);
 
 function start(hash = "#/fault") {
   const store = pretendStore();
@@ -17,13 +18,9 @@ function start(hash = "#/fault") {
   const address = pretendAddress(hash);
   const navigation = createNavigationModel(address);
   const notices = createNoticeModel();
-  const fault = createFaultModel({
-    journal,
-    navigation,
-    notices,
-    surroundings,
-    knowledge: () => KNOWLEDGE,
-  });
+  const expertise = createExpertiseModel(async () => EXPERTISE);
+  void expertise.load();
+  const fault = createFaultModel({ journal, navigation, notices, surroundings, expertise });
   const close = createCloseModel(fault, navigation, notices, surroundings);
   return { store, surroundings, journal, address, navigation, notices, fault, close };
 }

@@ -2,15 +2,14 @@ import type { ComponentChildren } from "preact";
 import type { AppModels } from "../../models/app-models.ts";
 import { ENDINGS } from "../../models/vocabulary.ts";
 import { DraftField } from "../parts/DraftField.tsx";
-import { CAUSE_TEXT } from "../text/causes.ts";
 import { ENDING_TEXT, FAULT_TEXT } from "../text/fault.ts";
-import { REMEDY_TEXT } from "../text/remedies.ts";
 import { FaultGone } from "./FaultGone.tsx";
 
 /** The verdict: how it ended, what it was, what helped. Filled in from the evidence, changed by tap. */
 export function FaultClose({ models }: { models: AppModels }) {
   if (models.fault.traced.value === null) return <FaultGone />;
   const model = models.close;
+  const words = models.expertise.words.value;
   return (
     <div class="stack">
       <Choices title={FAULT_TEXT.closeEnding}>
@@ -27,7 +26,7 @@ export function FaultClose({ models }: { models: AppModels }) {
         {model.offered.value.map((cause) => (
           <Choice
             key={cause}
-            text={CAUSE_TEXT[cause]?.name ?? cause}
+            text={words.causeName(cause)}
             isChosen={cause === model.cause.value}
             onPick={() => model.pickCause(cause)}
           />
@@ -43,7 +42,7 @@ export function FaultClose({ models }: { models: AppModels }) {
           {model.helped.value.map((remedy) => (
             <Choice
               key={remedy}
-              text={REMEDY_TEXT[remedy]?.title ?? remedy}
+              text={words.remedyTitle(remedy)}
               isChosen={remedy === model.remedy.value}
               onPick={() => model.pickRemedy(remedy)}
             />

@@ -1,7 +1,7 @@
 import type { FaultView, ShowView } from "../../journal/views.ts";
 import type { AppModels } from "../../models/app-models.ts";
+import type { Words } from "../../models/words.ts";
 import { MarkStrip } from "../parts/MarkStrip.tsx";
-import { CAUSE_TEXT } from "../text/causes.ts";
 import { ENDING_TEXT, FAULT_TEXT, markCount } from "../text/fault.ts";
 import { timeOf } from "../text/format.ts";
 import { MomentPicker } from "./MomentPicker.tsx";
@@ -17,6 +17,7 @@ export function FaultHome({ models }: { models: AppModels }) {
         </a>
       </div>
     );
+  const words = models.expertise.words.value;
   const open = models.fault.openFaults.value;
   const closed = show.faults.filter(({ verdict }) => verdict !== null);
   return (
@@ -24,15 +25,27 @@ export function FaultHome({ models }: { models: AppModels }) {
       <MomentPicker fault={models.fault} />
       {show.faults.length === 0 && <p>{FAULT_TEXT.purpose}</p>}
       {show.faults.length === 0 && <p class="soft">{FAULT_TEXT.noFaults}</p>}
-      {open.length > 0 && <FaultList title={FAULT_TEXT.openFaults} faults={open} show={show} />}
+      {open.length > 0 && (
+        <FaultList title={FAULT_TEXT.openFaults} faults={open} show={show} words={words} />
+      )}
       {closed.length > 0 && (
-        <FaultList title={FAULT_TEXT.closedFaults} faults={[...closed].reverse()} show={show} />
+        <FaultList
+          title={FAULT_TEXT.closedFaults}
+          faults={[...closed].reverse()}
+          show={show}
+          words={words}
+        />
       )}
     </div>
   );
 }
 
-function FaultList(props: { title: string; faults: readonly FaultView[]; show: ShowView }) {
+function FaultList(props: {
+  title: string;
+  faults: readonly FaultView[];
+  show: ShowView;
+  words: Words;
+}) {
   return (
     <section>
       <h2>{props.title}</h2>
@@ -43,7 +56,7 @@ function FaultList(props: { title: string; faults: readonly FaultView[]; show: S
             <a class="button wide" href={`#/fault/${fault.id}`}>
               {fault.verdict === null
                 ? `${FAULT_TEXT.trace} (${markCount(fault.marks.length)})`
-                : verdictLine(fault, props.show.timeZone)}
+                : verdictLine(fault, props.show.timeZone, props.words)}
             </a>
           </li>
         ))}
@@ -52,9 +65,9 @@ function FaultList(props: { title: string; faults: readonly FaultView[]; show: S
   );
 }
 
-function verdictLine({ verdict }: FaultView, timeZone: string): string {
+function verdictLine({ verdict }: FaultView, timeZone: string, words: Words): string {
   if (verdict === null) return "";
-  const causes = verdict.causes.map((cause) => CAUSE_TEXT[cause]?.name ?? cause).join(" + ");
+  const causes = verdict.causes.map(words.causeName).join(" + ");
   const what = causes === "" ? FAULT_TEXT.closeCauseUnknown : causes;
   return `${timeOf(verdict.at, timeZone)} ${ENDING_TEXT[verdict.ending]}: ${what}`;
 }

@@ -1,10 +1,10 @@
 import type { AppModels } from "../../models/app-models.ts";
-import { CHECK_TEXT } from "../text/checks.ts";
 import { FAULT_TEXT } from "../text/fault.ts";
-import { REMEDY_TEXT } from "../text/remedies.ts";
 import { FaultGone } from "./FaultGone.tsx";
 
-/** "Something else": every step that this moment of the show allows, best first. */
+const KINDS = ["remedy", "check"] as const;
+
+/** "Something else": every step that this moment of the show allows, best first of each kind. */
 export function FaultSteps({ models }: { models: AppModels }) {
   const model = models.fault;
   const traced = model.traced.value;
@@ -13,15 +13,23 @@ export function FaultSteps({ models }: { models: AppModels }) {
   return (
     <div class="stack">
       {steps.length === 0 && <p>{FAULT_TEXT.otherNone}</p>}
-      <div class="answers">
-        {steps.map((step) => (
-          <button key={`${step.kind}.${step.id}`} type="button" onClick={() => model.pick(step)}>
-            {step.kind === "check"
-              ? (CHECK_TEXT[step.id]?.question ?? step.id)
-              : (REMEDY_TEXT[step.id]?.title ?? step.id)}
-          </button>
-        ))}
-      </div>
+      {KINDS.map((kind) => {
+        const ofKind = steps.filter((step) => step.kind === kind);
+        return (
+          ofKind.length > 0 && (
+            <section key={kind} class="stack">
+              <h2>{FAULT_TEXT[kind]}</h2>
+              <div class="answers">
+                {ofKind.map((step) => (
+                  <button key={step.id} type="button" onClick={() => model.pick(step)}>
+                    {model.words.value.stepTitle(step)}
+                  </button>
+                ))}
+              </div>
+            </section>
+          )
+        );
+      })}
       <a class="button wide" href={`#/fault/${traced.fault.id}`}>
         {FAULT_TEXT.back}
       </a>

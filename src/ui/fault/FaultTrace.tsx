@@ -1,4 +1,5 @@
 import type { AppModels } from "../../models/app-models.ts";
+import type { ExpertiseModel } from "../../models/expertise-model.ts";
 import { MarkStrip } from "../parts/MarkStrip.tsx";
 import { FAULT_TEXT } from "../text/fault.ts";
 import { FaultGone } from "./FaultGone.tsx";
@@ -9,7 +10,7 @@ import { Suspects } from "./Suspects.tsx";
 
 /** One fault: the next step, what it could be, and what has been answered. */
 export function FaultTrace({ models }: { models: AppModels }) {
-  const { fault: model, journal } = models;
+  const { fault: model, journal, expertise } = models;
   const traced = model.traced.value;
   if (traced === null) return journal.phase.value === "loading" ? null : <FaultGone />;
   const { fault, show } = traced;
@@ -24,9 +25,27 @@ export function FaultTrace({ models }: { models: AppModels }) {
         </a>
       </div>
       <MomentPicker fault={model} />
-      <StepCard model={model} fault={fault} timeZone={show.timeZone} />
-      <Suspects model={model} />
+      {expertise.phase.value === "ready" ? (
+        <>
+          <StepCard model={model} fault={fault} timeZone={show.timeZone} />
+          <Suspects model={model} />
+        </>
+      ) : (
+        <Unread expertise={expertise} />
+      )}
       <GivenAnswers model={model} fault={fault} />
     </div>
+  );
+}
+
+function Unread({ expertise }: { expertise: ExpertiseModel }) {
+  if (expertise.phase.value === "loading") return <p class="soft">{FAULT_TEXT.reading}</p>;
+  return (
+    <section class="card stack" role="alert">
+      <p>{FAULT_TEXT.unread}</p>
+      <button type="button" onClick={() => void expertise.load()}>
+        {FAULT_TEXT.readAgain}
+      </button>
+    </section>
   );
 }

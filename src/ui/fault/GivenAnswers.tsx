@@ -1,22 +1,22 @@
 import type { FaultView } from "../../journal/views.ts";
 import type { FaultModel } from "../../models/fault-model.ts";
-import { CHECK_TEXT } from "../text/checks.ts";
+import { CANT_TELL } from "../../models/vocabulary.ts";
 import { FAULT_TEXT, RESULT_TEXT } from "../text/fault.ts";
-import { REMEDY_TEXT } from "../text/remedies.ts";
 
 /** What has been answered and tried, each to be taken back: everything is worked out anew then. */
 export function GivenAnswers({ model, fault }: { model: FaultModel; fault: FaultView }) {
+  const words = model.words.value;
   const given = [
     ...fault.answers.map(({ record, at, check, outcome }) => ({
       record,
       at,
-      title: CHECK_TEXT[check]?.question ?? check,
-      what: CHECK_TEXT[check]?.outcomes[outcome] ?? FAULT_TEXT.cantTell,
+      title: words.question(check),
+      what: outcome === CANT_TELL ? FAULT_TEXT.cantTell : words.outcome(check, outcome),
     })),
     ...fault.trials.map(({ record, at, remedy, result }) => ({
       record,
       at,
-      title: REMEDY_TEXT[remedy]?.title ?? remedy,
+      title: words.remedyTitle(remedy),
       what: RESULT_TEXT[result],
     })),
   ].sort((a, b) => a.at - b.at);

@@ -1,18 +1,17 @@
 import type { FaultModel } from "../../models/fault-model.ts";
 import { TRIAL_RESULTS } from "../../models/vocabulary.ts";
 import { FAULT_TEXT, RESULT_TEXT, secondsText } from "../text/fault.ts";
-import { REMEDY_TEXT } from "../text/remedies.ts";
 import { CautionList } from "./CautionList.tsx";
 
 export function RemedyStep({ model, id }: { model: FaultModel; id: string }) {
-  const remedy = model.knowledge().remedies.find((candidate) => candidate.id === id);
-  const text = REMEDY_TEXT[id];
-  if (!remedy || !text) return null;
+  const remedy = model.knowledge.value?.remedies.find((candidate) => candidate.id === id);
+  const words = model.words.value;
+  if (!remedy) return null;
   return (
     <>
-      <h2 class="question">{text.title}</h2>
+      <h2 class="question">{words.remedyTitle(id)}</h2>
       <p>
-        {text.how} <span class="soft">({secondsText(remedy.seconds)})</span>
+        {words.remedyHow(id)} <span class="soft">({secondsText(remedy.seconds)})</span>
       </p>
       <CautionList ids={remedy.cautions} />
       <p>{FAULT_TEXT.howDidItGo}</p>

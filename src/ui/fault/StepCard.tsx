@@ -1,7 +1,6 @@
 import type { FaultView } from "../../journal/views.ts";
 import type { FaultModel } from "../../models/fault-model.ts";
 import { CANT_TELL } from "../../models/vocabulary.ts";
-import { CAUSE_TEXT } from "../text/causes.ts";
 import { ENDING_TEXT, FAULT_TEXT, waitText, whyText } from "../text/fault.ts";
 import { timeOf } from "../text/format.ts";
 import { CheckStep } from "./CheckStep.tsx";
@@ -24,7 +23,7 @@ export function StepCard(props: { model: FaultModel; fault: FaultView; timeZone:
       {step?.kind === "check" && <CheckStep model={model} id={step.id} />}
       {step?.kind === "remedy" && <RemedyStep model={model} id={step.id} />}
       {advice?.kind === "step" && step === model.steps.value[0] && (
-        <p class="soft">{whyText(advice.reason, (cause) => CAUSE_TEXT[cause]?.name ?? cause)}</p>
+        <p class="soft">{whyText(advice.reason, model.words.value.causeName)}</p>
       )}
       <div class="pair">
         {step?.kind === "check" && (
@@ -59,7 +58,7 @@ function Verdict(props: {
   verdict: NonNullable<FaultView["verdict"]>;
 }) {
   const { verdict, timeZone, model } = props;
-  const causes = verdict.causes.map((cause) => CAUSE_TEXT[cause]?.name ?? cause).join(" + ");
+  const causes = verdict.causes.map(model.words.value.causeName).join(" + ");
   return (
     <section class="card stack" aria-label={FAULT_TEXT.closeTitle}>
       <h2 class="number">

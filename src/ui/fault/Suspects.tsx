@@ -1,14 +1,12 @@
 import type { FaultModel } from "../../models/fault-model.ts";
-import { CAUSE_TEXT } from "../text/causes.ts";
-import { CHECK_TEXT } from "../text/checks.ts";
 import { FAULT_TEXT, RESULT_TEXT, STRENGTH_TEXT } from "../text/fault.ts";
 import { decibels } from "../text/format.ts";
-import { REMEDY_TEXT } from "../text/remedies.ts";
 
 const SHOWN = 3;
 
 /** The three leading suspects; each unfolds into the evidence for and against it, in decibels. */
 export function Suspects({ model }: { model: FaultModel }) {
+  const words = model.words.value;
   return (
     <section>
       <h2>{FAULT_TEXT.suspects}</h2>
@@ -17,7 +15,7 @@ export function Suspects({ model }: { model: FaultModel }) {
           <details key={suspect.cause} class="unfold">
             <summary>
               <span class="row">
-                <strong>{CAUSE_TEXT[suspect.cause]?.name ?? suspect.cause}</strong>
+                <strong>{words.causeName(suspect.cause)}</strong>
                 <span class="soft">
                   {STRENGTH_TEXT[suspect.strength]}, {suspect.percent} %
                 </span>
@@ -27,7 +25,7 @@ export function Suspects({ model }: { model: FaultModel }) {
               </span>
             </summary>
             <div class="evidence">
-              <p class="soft">{CAUSE_TEXT[suspect.cause]?.plain}</p>
+              <p class="soft">{words.causePlain(suspect.cause)}</p>
               <Evidence model={model} cause={suspect.cause} />
             </div>
           </details>
@@ -38,6 +36,7 @@ export function Suspects({ model }: { model: FaultModel }) {
 }
 
 function Evidence({ model, cause }: { model: FaultModel; cause: string }) {
+  const words = model.words.value;
   const weights = model.weights(cause);
   if (weights.length === 0) return <p>{FAULT_TEXT.noEvidence}</p>;
   return (
@@ -47,8 +46,8 @@ function Evidence({ model, cause }: { model: FaultModel; cause: string }) {
           <li key={`${kind}.${id}`}>
             <span>
               {kind === "check"
-                ? (CHECK_TEXT[id]?.outcomes[outcome] ?? outcome)
-                : `${REMEDY_TEXT[id]?.title ?? id}: ${resultText(outcome)}`}
+                ? words.outcome(id, outcome)
+                : `${words.remedyTitle(id)}: ${resultText(outcome)}`}
             </span>
             <span class="number">{decibels(weightDb)}</span>
           </li>

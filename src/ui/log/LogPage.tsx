@@ -1,10 +1,11 @@
+import type { ReportWording } from "../../journal/report.ts";
 import type { ShowView, TimelineEntry } from "../../journal/views.ts";
 import type { AppModels } from "../../models/app-models.ts";
 import type { LogModel } from "../../models/log-model.ts";
 import { DraftField } from "../parts/DraftField.tsx";
 import { dateOf, timeOf } from "../text/format.ts";
 import { LOG_TEXT } from "../text/log.ts";
-import { REPORT_WORDING } from "../text/report.ts";
+import { reportWording } from "../text/report.ts";
 import { SHELL_TEXT } from "../text/shell.ts";
 
 /** The show's timeline, latest entry first, and the way out of the phone for it. */
@@ -21,6 +22,7 @@ export function LogPage({ models }: { models: AppModels }) {
       </div>
     );
   const name = show.name || SHELL_TEXT.unnamedShow;
+  const wording = reportWording(models.expertise.words.value);
   return (
     <div class="stack">
       <div class="row">
@@ -30,7 +32,7 @@ export function LogPage({ models }: { models: AppModels }) {
           <br />
           <span class="soft number">{dateOf(show.openedAt, show.timeZone)}</span>
         </p>
-        <button type="button" onClick={() => void model.share(name, REPORT_WORDING)}>
+        <button type="button" onClick={() => void model.share(name, wording)}>
           {LOG_TEXT.share}
         </button>
       </div>
@@ -60,17 +62,22 @@ export function LogPage({ models }: { models: AppModels }) {
       </form>
       <ol class="entries" reversed>
         {[...show.timeline].reverse().map((entry) => (
-          <Entry key={entry.record.id} entry={entry} show={show} model={model} />
+          <Entry key={entry.record.id} entry={entry} show={show} model={model} wording={wording} />
         ))}
       </ol>
     </div>
   );
 }
 
-function Entry(props: { entry: TimelineEntry; show: ShowView; model: LogModel }) {
+function Entry(props: {
+  entry: TimelineEntry;
+  show: ShowView;
+  model: LogModel;
+  wording: ReportWording;
+}) {
   const { show, model } = props;
   const { record, isWithdrawn, withdrawals } = props.entry;
-  const line = model.lineOf(props.entry, show, REPORT_WORDING);
+  const line = model.lineOf(props.entry, show, props.wording);
   return (
     <li class="row nowrap">
       <span>

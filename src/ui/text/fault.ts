@@ -27,6 +27,12 @@ export const FAULT_TEXT = {
   noEvidence: "Nothing answered yet moves this one.",
   evidenceUnit: "Evidence in decibels: +10 dB makes it ten times likelier against the rest.",
   otherTitle: "Other steps",
+  remedy: "Put it right",
+  check: "Find out",
+  reading: "Reading what the fault finder knows…",
+  unread:
+    "What the fault finder knows could not be read. Marking, the log and the calculators work. Try again.",
+  readAgain: "Try again",
   otherNone: "Nothing else can be done at this moment of the show.",
   exhausted:
     "Every step has been done or skipped. Close the fault with what you know, or take an answer back.",

@@ -1,10 +1,9 @@
 import type { ReportWording } from "../../journal/report.ts";
+import { CANT_TELL } from "../../models/vocabulary.ts";
+import type { Words } from "../../models/words.ts";
 import { CALCULATORS_TEXT } from "./calculators.ts";
-import { CAUSE_TEXT } from "./causes.ts";
-import { CHECK_TEXT } from "./checks.ts";
 import { ENDING_TEXT, FAULT_TEXT, MOMENT_TEXT, PLACE_TEXT, RESULT_TEXT } from "./fault.ts";
 import { dateOf, megahertz, timeOf } from "./format.ts";
-import { REMEDY_TEXT } from "./remedies.ts";
 import { KIND_TEXT } from "./rig.ts";
 import { SHELL_TEXT } from "./shell.ts";
 
@@ -14,14 +13,15 @@ const where = (links: readonly string[], place: string | null): string =>
   [links.join(", "), place ?? ""].filter((part) => part !== "").join("; ");
 
 /** Every word of a shared report and of the lines of the log. */
-export const REPORT_WORDING: ReportWording = {
+export const reportWording = (words: Words): ReportWording => ({
   time: timeOf,
   date: dateOf,
-  causeName: (cause) => CAUSE_TEXT[cause]?.name ?? cause,
-  checkQuestion: (check) => CHECK_TEXT[check]?.question ?? check,
-  outcomeLabel: (check, outcome) => CHECK_TEXT[check]?.outcomes[outcome] ?? FAULT_TEXT.cantTell,
-  remedyTitle: (remedy) => REMEDY_TEXT[remedy]?.title ?? remedy,
-  stepTitle: (step) => CHECK_TEXT[step]?.question ?? REMEDY_TEXT[step]?.title ?? step,
+  causeName: words.causeName,
+  checkQuestion: words.question,
+  outcomeLabel: (check, outcome) =>
+    outcome === CANT_TELL ? FAULT_TEXT.cantTell : words.outcome(check, outcome),
+  remedyTitle: words.remedyTitle,
+  stepTitle: words.anyTitle,
   calculatorName: (calculator) =>
     calculator === "distance" ? CALCULATORS_TEXT.distance : calculator,
   linkKind: (kind) => KIND_TEXT[kind],
@@ -67,4 +67,4 @@ export const REPORT_WORDING: ReportWording = {
     return detail === "" ? `Dropout at ${time}.` : `Dropout at ${time}: ${detail}.`;
   },
   faultStillOpen: "Still open.",
-};
+});

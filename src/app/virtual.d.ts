@@ -1,0 +1,4 @@
+/** Made by expertise.plugin.ts. */
+declare module "virtual:expertise-address" {
+  export const expertiseAddress: string;
+}
