@@ -4,6 +4,7 @@ export interface Wording {
   readonly causes: Readonly<Record<string, CauseWording>>;
   readonly checks: Readonly<Record<string, CheckWording>>;
   readonly remedies: Readonly<Record<string, RemedyWording>>;
+  readonly cautions: Readonly<Record<string, CautionWording>>;
 }
 
 export interface CauseWording {
@@ -26,4 +27,10 @@ export interface RemedyWording {
   readonly title: string;
   /** How, in one or two sentences. */
   readonly how: string;
+}
+
+/** Stands beside the steps that name it, and on the page of all cautions. */
+export interface CautionWording {
+  readonly title: string;
+  readonly text: string;
 }

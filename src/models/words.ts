@@ -1,5 +1,5 @@
 import type { StepName } from "../diagnosis/next-step.ts";
-import type { Wording } from "../facts/wording.ts";
+import type { CautionWording, Wording } from "../facts/wording.ts";
 
 /**
  * The fault finder's words by id. An id without words (from a newer journal, or while the words have
@@ -14,6 +14,8 @@ export interface Words {
   remedyTitle(remedy: string): string;
   remedyHow(remedy: string): string;
   stepTitle(step: StepName): string;
+  caution(id: string): CautionWording | null;
+  readonly cautions: readonly CautionWording[];
   /** Of a step whose kind was not recorded: ids are used once among checks and remedies. */
   anyTitle(step: string): string;
 }
@@ -22,6 +24,7 @@ export function createWords(wording: Wording | null): Words {
   const causes = wording?.causes ?? {};
   const checks = wording?.checks ?? {};
   const remedies = wording?.remedies ?? {};
+  const cautions = wording?.cautions ?? {};
   const words: Words = {
     causeName: (cause) => causes[cause]?.name ?? cause,
     causePlain: (cause) => causes[cause]?.plain ?? "",
@@ -31,6 +34,8 @@ export function createWords(wording: Wording | null): Words {
     remedyTitle: (remedy) => remedies[remedy]?.title ?? remedy,
     remedyHow: (remedy) => remedies[remedy]?.how ?? "",
     stepTitle: ({ kind, id }) => (kind === "check" ? words.question(id) : words.remedyTitle(id)),
+    caution: (id) => cautions[id] ?? null,
+    cautions: Object.values(cautions),
     anyTitle: (step) => (checks[step] ? words.question(step) : words.remedyTitle(step)),
   };
   return words;

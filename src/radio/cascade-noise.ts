@@ -24,7 +24,7 @@ const SILENT_BELOW_DB = 1e-300;
  * driven into compression, nor images that a mixer lets through.
  *
  * @param stages        Gain and noise figure of each, in the order of the signal. [dB], −300 to 300 and
- *                      0 to 300, 1 to 40 of them; the gain of the last has no effect
+ *                      0 to 400, 1 to 40 of them; the gain of the last has no effect
  * @returns             Noise figure of the chain, referred to its input. [dB], 0 or more
  * @throws RangeError   If there is no stage or too many, or a value lies outside its range or is NaN.
  * @accuracy            exact for the assumptions

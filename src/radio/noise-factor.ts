@@ -2,7 +2,7 @@ import type { Limits } from "./limits.ts";
 import { requireRange } from "./require-range.ts";
 import { NOISE_FIGURE_LIMITS_DB } from "./signal-limits.ts";
 
-const NOISE_FACTOR_LIMITS: Limits = { min: 1, max: 1e30 };
+const NOISE_FACTOR_LIMITS: Limits = { min: 1, max: 1e40 };
 
 /**
  * Noise figure as a plain ratio: by how many times a stage worsens signal over noise.
@@ -11,7 +11,7 @@ const NOISE_FACTOR_LIMITS: Limits = { min: 1, max: 1e30 };
  *
  * Assumes: input noise of 290 K. Not for: what a stage does to a signal whose noise is higher already.
  *
- * @param noiseFigureDb  Noise figure. [dB], 0 to 300
+ * @param noiseFigureDb  Noise figure. [dB], 0 to 400
  * @returns              Noise factor. [none], 1 or more
  * @throws RangeError    If the noise figure lies outside that range or is NaN.
  * @accuracy             exact
@@ -32,7 +32,7 @@ export function noiseFactor(noiseFigureDb: number): number {
  *
  * Assumes: as noiseFactor. Not for: ratios below 1, which no stage can have.
  *
- * @param factor         Noise factor. [none], 1 to 10³⁰
+ * @param factor         Noise factor. [none], 1 to 10⁴⁰
  * @returns              Noise figure. [dB], 0 or more
  * @throws RangeError    If the factor lies outside that range or is NaN.
  * @accuracy             exact

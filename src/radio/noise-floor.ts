@@ -11,7 +11,7 @@ import { REFERENCE_TEMPERATURE_K, thermalNoiseDbm } from "./thermal-noise.ts";
  * lamps, displays and other transmitters add (noiseRiseDb).
  *
  * @param bandwidthHz    Noise bandwidth of the receiver. [Hz], 1 to 10¹²
- * @param noiseFigureDb  Noise figure of the receiver or of its whole line. [dB], 0 to 300
+ * @param noiseFigureDb  Noise figure of the receiver or of its whole line. [dB], 0 to 400
  * @returns              Noise power referred to the input. [dBm]
  * @throws RangeError    If an input lies outside its range or is NaN.
  * @accuracy             exact for the assumptions

@@ -3,7 +3,7 @@ import { requireRange } from "./require-range.ts";
 import { NOISE_FIGURE_LIMITS_DB } from "./signal-limits.ts";
 import { REFERENCE_TEMPERATURE_K } from "./thermal-noise.ts";
 
-const NOISE_TEMPERATURE_LIMITS_K: Limits = { min: 0, max: 1e37 };
+const NOISE_TEMPERATURE_LIMITS_K: Limits = { min: 0, max: 1e43 };
 
 /**
  * How warm a source would have to be to make the noise that a stage adds.
@@ -12,7 +12,7 @@ const NOISE_TEMPERATURE_LIMITS_K: Limits = { min: 0, max: 1e37 };
  *
  * Assumes: noise figure stated for 290 K, as is usual. Not for: the temperature of the device itself.
  *
- * @param noiseFigureDb  Noise figure. [dB], 0 to 300
+ * @param noiseFigureDb  Noise figure. [dB], 0 to 400
  * @returns              Equivalent noise temperature. [K], 0 or more
  * @throws RangeError    If the noise figure lies outside that range or is NaN.
  * @accuracy             exact
@@ -33,7 +33,7 @@ export function noiseTemperatureK(noiseFigureDb: number): number {
  *
  * Assumes: as noiseTemperatureK. Not for: the temperature that an antenna sees.
  *
- * @param temperatureK   Equivalent noise temperature. [K], 0 to 10³⁷
+ * @param temperatureK   Equivalent noise temperature. [K], 0 to 10⁴³
  * @returns              Noise figure. [dB], 0 or more
  * @throws RangeError    If the temperature lies outside that range or is NaN.
  * @accuracy             exact

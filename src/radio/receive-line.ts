@@ -32,7 +32,7 @@ export interface LinePoint {
  * into compression (gainCompressionDb), nor products made on the way (intermodLevelDbm).
  *
  * @param line.elements        In the order of the signal: lossDb and temperatureK as attenuatorNoiseFigureDb takes
- *                             them, gainDb −300 to 300 and noiseFigureDb 0 to 300; 1 to 40 of them. [dB], [K]
+ *                             them, gainDb −300 to 300 and noiseFigureDb 0 to 400; 1 to 40 of them. [dB], [K]
  * @param line.levelDbm        Carrier at the antenna's output. [dBm], −400 to 200
  * @param line.bandwidthHz     Noise bandwidth of the receiver. [Hz], 1 to 10¹²
  * @param line.antennaNoiseDb  What the antenna picks up over kT0B; 0 for surroundings at 290 K. [dB], −100 to 300

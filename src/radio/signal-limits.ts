@@ -5,6 +5,6 @@ import type { Limits } from "./limits.ts";
 export const LEVEL_LIMITS_DBM: Limits = { min: -400, max: 200 };
 export const GAIN_LIMITS_DB: Limits = { min: -300, max: 300 };
 export const LOSS_LIMITS_DB: Limits = { min: 0, max: 300 };
-export const NOISE_FIGURE_LIMITS_DB: Limits = { min: 0, max: 300 };
+export const NOISE_FIGURE_LIMITS_DB: Limits = { min: 0, max: 400 };
 export const BANDWIDTH_LIMITS_HZ: Limits = { min: 1, max: 1e12 };
 export const TEMPERATURE_LIMITS_K: Limits = { min: 0.001, max: 1e6 };

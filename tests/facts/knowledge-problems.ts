@@ -5,12 +5,7 @@ import {
   MOMENTS,
   NONE_OF_THESE,
 } from "../../src/diagnosis/knowledge.ts";
-import type { Wording as FaultFinderWording } from "../../src/facts/wording.ts";
-import type { CautionText } from "../../src/ui/text/cautions.ts";
-
-export interface Wording extends FaultFinderWording {
-  readonly cautions: Readonly<Record<string, CautionText>>;
-}
+import type { Wording } from "../../src/facts/wording.ts";
 
 /** Raw sum of a row's words that still counts as one distribution. */
 const LEAST_SUM = 0.85;

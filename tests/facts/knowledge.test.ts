@@ -5,11 +5,11 @@ import remediesFile from "../../shared/knowledge/remedies.json";
 import scaleFile from "../../shared/knowledge/scale.json";
 import type { Elicited } from "../../src/diagnosis/elicit.ts";
 import { EXPERTISE } from "../../src/facts/expertise.ts";
-import { CAUTION_TEXT } from "../../src/ui/text/cautions.ts";
-import { knowledgeProblems, type Wording } from "./knowledge-problems.ts";
+import type { Wording } from "../../src/facts/wording.ts";
+import { knowledgeProblems } from "./knowledge-problems.ts";
 
 const ELICITED = EXPERTISE.elicited;
-const WORDING: Wording = { ...EXPERTISE.wording, cautions: CAUTION_TEXT };
+const WORDING = EXPERTISE.wording;
 
 type Writable<T> = { -readonly [K in keyof T]: Writable<T[K]> };
 type Draft = { raw: Writable<Elicited>; wording: Writable<Wording> };
@@ -105,7 +105,7 @@ describe("the knowledge of the app", () => {
 
   it("defers to competent people and local rules where work can hurt", () => {
     for (const id of ["height", "mains", "licence"]) {
-      expect(CAUTION_TEXT[id]?.text).toMatch(/competent|trained|local codes|licence/);
+      expect(WORDING.cautions[id]?.text).toMatch(/competent|trained|local codes|licence/);
     }
   });
 

@@ -38,47 +38,17 @@ export const DISTANCE_FIELDS = {
 export type DistanceFieldId = keyof typeof DISTANCE_FIELDS;
 export const DISTANCE_FIELD_IDS = Object.keys(DISTANCE_FIELDS) as readonly DistanceFieldId[];
 
-/** A published exponent to start from; any other may be typed. */
-export interface ExponentPreset {
-  readonly id: string;
-  readonly value: number;
-  readonly source: string;
-  /** "exact" follows from the definition; "second-hand" was read in a copy, not in the source itself. */
-  readonly standing: "exact" | "second-hand";
-}
-
-const P1238 = "Rec. ITU-R P.1238-11, Table 2, coefficient α";
-
-/** P.1238 coefficients read at github.com/aajuvonen/octave-rxt (model_p1238.m), 2026-12-01. */
+/**
+ * Published exponents to start from; any other may be typed. The first follows from the definition
+ * (Rec. ITU-R P.525-5, free-space basic transmission loss). The others are the coefficient α of
+ * Rec. ITU-R P.1238-11, Table 2, and hold where it says: office 0.3 to 83.5 GHz, in sight 2 to 27 m,
+ * out of sight 4 to 30 m; industrial 0.625 to 70.28 GHz, 2 to 101 m and 5 to 108 m. Second-hand:
+ * read in an open implementation of the recommendation (model_p1238.m, octave-rxt), 2026-12-01.
+ */
 export const EXPONENT_PRESETS = [
-  {
-    id: "free-space",
-    value: 2,
-    source: "Rec. ITU-R P.525-5, free-space basic transmission loss",
-    standing: "exact",
-  },
-  {
-    id: "office-los",
-    value: 1.46,
-    source: `${P1238}: office, line of sight, 2 to 27 m, 0.3 to 83.5 GHz`,
-    standing: "second-hand",
-  },
-  {
-    id: "office-nlos",
-    value: 2.46,
-    source: `${P1238}: office, no line of sight, 4 to 30 m, 0.3 to 82 GHz`,
-    standing: "second-hand",
-  },
-  {
-    id: "industrial-los",
-    value: 2.31,
-    source: `${P1238}: industrial, line of sight, 2 to 101 m, 0.625 to 70.28 GHz`,
-    standing: "second-hand",
-  },
-  {
-    id: "industrial-nlos",
-    value: 3.79,
-    source: `${P1238}: industrial, no line of sight, 5 to 108 m, 0.625 to 70.28 GHz`,
-    standing: "second-hand",
-  },
-] as const satisfies readonly ExponentPreset[];
+  { id: "free-space", value: 2 },
+  { id: "office-los", value: 1.46 },
+  { id: "office-nlos", value: 2.46 },
+  { id: "industrial-los", value: 2.31 },
+  { id: "industrial-nlos", value: 3.79 },
+] as const;

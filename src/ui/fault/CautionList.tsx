@@ -1,11 +1,11 @@
-import { CAUTION_TEXT } from "../text/cautions.ts";
+import type { Words } from "../../models/words.ts";
 
-/** Short, where the risk is; the whole text unfolds. */
-export function CautionList({ ids }: { ids: readonly string[] }) {
+/** Right where the risk is, before the buttons that answer the step. */
+export function CautionList({ ids, words }: { ids: readonly string[]; words: Words }) {
   return (
     <>
       {ids.map((id) => {
-        const caution = CAUTION_TEXT[id];
+        const caution = words.caution(id);
         return (
           caution && (
             <p key={id} class="caution">

@@ -9,7 +9,7 @@ export function CheckStep({ model, id }: { model: FaultModel; id: string }) {
     <>
       <h2 class="question">{words.question(id)}</h2>
       <p>{words.checkHow(id)}</p>
-      <CautionList ids={check.cautions} />
+      <CautionList ids={check.cautions} words={words} />
       <div class="answers">
         {check.outcomes.map((outcome) => (
           <button key={outcome} type="button" onClick={() => void model.answer(id, outcome)}>

@@ -13,7 +13,7 @@ export function RemedyStep({ model, id }: { model: FaultModel; id: string }) {
       <p>
         {words.remedyHow(id)} <span class="soft">({secondsText(remedy.seconds)})</span>
       </p>
-      <CautionList ids={remedy.cautions} />
+      <CautionList ids={remedy.cautions} words={words} />
       <p>{FAULT_TEXT.howDidItGo}</p>
       <div class="answers two">
         {remedy.isWorkaround ? (

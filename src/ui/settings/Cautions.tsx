@@ -1,13 +1,13 @@
-import { CAUTION_TEXT } from "../text/cautions.ts";
+import type { AppModels } from "../../models/app-models.ts";
 import { CAUTIONS_INTRO } from "../text/settings.ts";
 
 /** All cautions in one place; each also stands where its risk is. */
-export function Cautions() {
+export function Cautions({ models }: { models: AppModels }) {
   return (
     <div class="stack">
       <p>{CAUTIONS_INTRO}</p>
-      {Object.entries(CAUTION_TEXT).map(([id, { title, text }]) => (
-        <details key={id} class="unfold">
+      {models.expertise.words.value.cautions.map(({ title, text }) => (
+        <details key={title} class="unfold">
           <summary>
             <strong>{title}</strong>
           </summary>
