@@ -38,7 +38,11 @@ const contentSecurityPolicy: Plugin = {
 export default defineConfig({
   // Relative, so that the built folder works from any sub-path of any static host.
   base: "./",
-  oxc: { jsx: { runtime: "automatic", importSource: "preact" } },
+  // The classic form is smaller: children are arguments, and the runtime of the automatic form stays out.
+  oxc: {
+    jsx: { runtime: "classic", pragma: "h", pragmaFrag: "Fragment" },
+    jsxInject: 'import { h, Fragment } from "preact";',
+  },
   // The package names its build for old browsers first, which is 1 kB larger.
   resolve: { alias: { "workbox-window": "workbox-window/build/workbox-window.prod.mjs" } },
   build: {
@@ -46,6 +50,12 @@ export default defineConfig({
     modulePreload: { polyfill: false },
     assetsInlineLimit: 0,
     reportCompressedSize: false,
+    // A fiftieth smaller than the built-in minifier's output.
+    minify: "terser",
+    terserOptions: { ecma: 2020, module: true, compress: { passes: 3 } },
+    rolldownOptions: {
+      treeshake: { unknownGlobalSideEffects: false, propertyReadSideEffects: false },
+    },
   },
   plugins: [
     contentSecurityPolicy,

@@ -1,8 +1,8 @@
-import causes from "../../shared/knowledge/causes.json";
-import checks from "../../shared/knowledge/checks.json";
-import remedies from "../../shared/knowledge/remedies.json";
-import scale from "../../shared/knowledge/scale.json";
-import wording from "../../shared/wording/fault-finder.en.json";
+import causes from "../../shared/knowledge/causes.json" with { type: "json" };
+import checks from "../../shared/knowledge/checks.json" with { type: "json" };
+import remedies from "../../shared/knowledge/remedies.json" with { type: "json" };
+import scale from "../../shared/knowledge/scale.json" with { type: "json" };
+import wording from "../../shared/wording/fault-finder.en.json" with { type: "json" };
 import type { Elicited } from "../diagnosis/elicit.ts";
 import type { Wording } from "./wording.ts";
 

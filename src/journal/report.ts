@@ -1,57 +1,25 @@
-import type {
-  Ending,
-  JournalRecord,
-  LinkKind,
-  Moment,
-  StagePlace,
-  TrialResult,
-} from "./records.ts";
-import type { FaultView, LinkView, ShowView } from "./views.ts";
+import type { Entry, JournalRecord, Moment, RecordType, StagePlace } from "./records.ts";
+import type { FaultView, ShowView } from "./views.ts";
 
-/** The sentence of each entry, without its time. Names arrive in words already. */
-export interface EntrySentences {
-  "show.opened"(words: { name: string; place: string }): string;
-  "show.edited"(words: { name: string; place: string }): string;
-  "show.closed"(): string;
-  "moment.set"(words: { moment: string }): string;
-  "link.set"(words: { name: string; kind: string; frequencyMhz: number | null }): string;
-  "link.removed"(words: { name: string }): string;
-  "fault.opened"(words: { moment: string }): string;
-  "dropout.marked"(): string;
-  /** `time` is that of the mark, null where the mark is missing. */
-  "dropout.detailed"(words: { time: string | null; links: string[]; place: string | null }): string;
-  "check.answered"(words: { question: string; outcome: string }): string;
-  "step.skipped"(words: { step: string }): string;
-  "remedy.tried"(words: { remedy: string; result: string }): string;
-  "fault.closed"(words: {
-    causes: string[];
-    ending: string;
-    remedy: string | null;
-    note: string;
-  }): string;
-  "sum.kept"(words: { calculator: string; sentence: string }): string;
-  "note.added"(words: { text: string }): string;
-  "record.withdrawn"(): string;
+/** What a sentence may ask of the show that its entry belongs to. */
+export interface Known {
+  /** Name that a link has now; a removed one keeps the name it last had. */
+  linkName(link: string): string;
+  /** Time of day of a mark; null where the mark is missing. */
+  markTime(mark: string): string | null;
 }
 
-/** Every word of the report: the journal has none of its own. Ids may be unknown to it. */
+/** The sentence of each entry, without its time. Ids in the body may be unknown to the wording. */
+export type EntrySentences = {
+  readonly [T in RecordType]: (body: Entry<T>["body"], known: Known) => string;
+};
+
+/** Every word of the report: the journal has none of its own. */
 export interface ReportWording {
   /** Time of day. Must take any zone name, also one that the phone does not know. */
   time(atMs: number, timeZone: string): string;
   /** Calendar day, likewise. */
   date(atMs: number, timeZone: string): string;
-  causeName(cause: string): string;
-  checkQuestion(check: string): string;
-  outcomeLabel(check: string, outcome: string): string;
-  remedyTitle(remedy: string): string;
-  /** Title of a check or a remedy. */
-  stepTitle(step: string): string;
-  calculatorName(calculator: string): string;
-  linkKind(kind: LinkKind): string;
-  moment(moment: Moment): string;
-  place(place: StagePlace): string;
-  trialResult(result: TrialResult): string;
-  ending(ending: Ending): string;
   /** Stands for a link whose record is missing. */
   readonly unknownLink: string;
   readonly entry: EntrySentences;
@@ -60,71 +28,26 @@ export interface ReportWording {
   readonly linksHeading: string;
   readonly timelineHeading: string;
   /** `number` counts the faults of the show from 1. */
-  faultHeading(words: { number: number; date: string; time: string; moment: string }): string;
-  markLine(words: { time: string; links: string[]; place: string | null }): string;
+  faultHeading(words: { number: number; date: string; time: string; moment: Moment }): string;
+  markLine(words: { time: string; links: readonly string[]; place: StagePlace | null }): string;
   readonly faultStillOpen: string;
 }
 
 /** What an entry of the show says, as one sentence without its time. */
 export function entryLine(record: JournalRecord, show: ShowView, wording: ReportWording): string {
-  const { entry } = wording;
-  switch (record.type) {
-    case "show.opened":
-    case "show.edited":
-      return entry[record.type](record.body);
-    case "show.closed":
-    case "dropout.marked":
-    case "record.withdrawn":
-      return entry[record.type]();
-    case "moment.set":
-    case "fault.opened":
-      return entry[record.type]({ moment: wording.moment(record.body.moment) });
-    case "link.set":
-      return linkLine(record.body, wording);
-    case "link.removed":
-      return entry["link.removed"]({ name: linkName(record.body.link, show, wording) });
-    case "dropout.detailed": {
-      const { mark, ...where } = record.body;
-      const marked = show.timeline.find((other) => other.record.id === mark)?.record;
-      return entry["dropout.detailed"]({
-        time: marked ? wording.time(marked.at, show.timeZone) : null,
-        ...placeWords(where, show, wording),
-      });
-    }
-    case "check.answered": {
-      const { check, outcome } = record.body;
-      return entry["check.answered"]({
-        question: wording.checkQuestion(check),
-        outcome: wording.outcomeLabel(check, outcome),
-      });
-    }
-    case "step.skipped":
-      return entry["step.skipped"]({ step: wording.stepTitle(record.body.step) });
-    case "remedy.tried": {
-      const { remedy, result } = record.body;
-      return entry["remedy.tried"]({
-        remedy: wording.remedyTitle(remedy),
-        result: wording.trialResult(result),
-      });
-    }
-    case "fault.closed":
-      return verdictLine(record.body, wording);
-    case "sum.kept": {
-      const { calculator, sentence } = record.body;
-      return entry["sum.kept"]({ calculator: wording.calculatorName(calculator), sentence });
-    }
-    case "note.added":
-      return entry["note.added"](record.body);
-  }
+  const say = wording.entry[record.type] as (body: unknown, known: Known) => string;
+  return say(record.body, knownOf(show, wording));
 }
 
 /** The show as plain text to hand over, in the show's own time zone. Withdrawn entries are left out. */
 export function showText(show: ShowView, wording: ReportWording): string {
   const { name, place, timeZone, links } = show;
+  const known = knownOf(show, wording);
   const date = wording.date(show.openedAt, timeZone);
   const lines = [wording.title({ name, place, date })];
   if (links.length > 0) lines.push("", wording.linksHeading);
-  for (const link of links) lines.push(item(linkLine(link, wording)));
+  for (const { id, ...link } of links)
+    lines.push(item(wording.entry["link.set"]({ link: id, ...link }, known)));
   for (const [index, fault] of show.faults.entries())
     lines.push("", ...faultLines(fault, index + 1, show, wording));
   lines.push("", wording.timelineHeading);
@@ -147,59 +70,45 @@ function faultLines(
   show: ShowView,
   wording: ReportWording,
 ): readonly string[] {
+  const known = knownOf(show, wording);
   const time = (atMs: number): string => wording.time(atMs, show.timeZone);
+  const { verdict, moment } = fault;
   return [
     wording.faultHeading({
       number,
       date: wording.date(fault.openedAt, show.timeZone),
       time: time(fault.openedAt),
-      moment: wording.moment(fault.moment),
+      moment,
     }),
-    ...fault.marks.map((mark) =>
-      item(wording.markLine({ time: time(mark.at), ...placeWords(mark, show, wording) })),
+    ...fault.marks.map(({ at, links, place }) =>
+      item(wording.markLine({ time: time(at), links: links.map(known.linkName), place })),
     ),
-    item(fault.verdict ? verdictLine(fault.verdict, wording) : wording.faultStillOpen),
+    item(
+      verdict === null
+        ? wording.faultStillOpen
+        : wording.entry["fault.closed"](
+            { ...verdict, fault: fault.id, causes: [...verdict.causes] },
+            known,
+          ),
+    ),
   ];
 }
 
-function linkLine(
-  { name, kind, frequencyMhz }: Omit<LinkView, "id">,
-  wording: ReportWording,
-): string {
-  return wording.entry["link.set"]({ name, kind: wording.linkKind(kind), frequencyMhz });
-}
-
-function verdictLine(
-  verdict: { causes: readonly string[]; ending: Ending; remedy: string | null; note: string },
-  wording: ReportWording,
-): string {
-  return wording.entry["fault.closed"]({
-    causes: verdict.causes.map((cause) => wording.causeName(cause)),
-    ending: wording.ending(verdict.ending),
-    remedy: verdict.remedy === null ? null : wording.remedyTitle(verdict.remedy),
-    note: verdict.note,
-  });
-}
-
-function placeWords(
-  where: { links: readonly string[]; place: StagePlace | null },
-  show: ShowView,
-  wording: ReportWording,
-): { links: string[]; place: string | null } {
+function knownOf(show: ShowView, wording: ReportWording): Known {
   return {
-    links: where.links.map((link) => linkName(link, show, wording)),
-    place: where.place === null ? null : wording.place(where.place),
+    linkName: (link) => {
+      const listed = show.links.find(({ id }) => id === link);
+      if (listed) return listed.name;
+      const last = show.timeline.findLast(
+        ({ record }) => record.type === "link.set" && record.body.link === link,
+      )?.record;
+      return last?.type === "link.set" ? last.body.name : wording.unknownLink;
+    },
+    markTime: (mark) => {
+      const marked = show.timeline.find(({ record }) => record.id === mark)?.record;
+      return marked ? wording.time(marked.at, show.timeZone) : null;
+    },
   };
-}
-
-/** A removed link keeps the name it last had. */
-function linkName(link: string, show: ShowView, wording: ReportWording): string {
-  const listed = show.links.find(({ id }) => id === link);
-  if (listed) return listed.name;
-  const last = show.timeline.findLast(
-    ({ record }) => record.type === "link.set" && record.body.link === link,
-  )?.record;
-  return last?.type === "link.set" ? last.body.name : wording.unknownLink;
 }
 
 /** One line of a list; further lines of a note stay under it. */

@@ -54,7 +54,8 @@ export function fieldCorrelationRatio(spacingM: number, frequencyMhz: number): n
  * @accuracy            exact for the powers; for the amplitudes within 0.02
  * @source              as fieldCorrelationRatio: powers of complex Gaussian fields correlate as the square
  * @differs             none
- * @checkedBy           spacing-0-1-envelope, spacing-0-25-envelope, spacing-0-5-envelope, spacing-1-envelope
+ * @checkedBy           spacing-0-1-envelope, spacing-0-25-envelope, spacing-0-5-envelope,
+ *                      spacing-1-envelope
  */
 export function envelopeCorrelationRatio(spacingM: number, frequencyMhz: number): number {
   return fieldCorrelationRatio(spacingM, frequencyMhz) ** 2;

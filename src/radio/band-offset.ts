@@ -18,7 +18,7 @@ import { requireRange } from "./require-range.ts";
  * @source                   D. M. Pozar, Microwave Engineering, section 8.4, from memory, to be verified; example 8.8 read
  *                           second-hand at github.com/FOSSEE/Python-Textbook-Companions, 2026-12-01.
  * @differs                  The book allows the arithmetic mean for f0 in narrow bands; the geometric one here.
- * @checkedBy                none published, see test
+ * @checkedBy           none published, see test
  */
 export function bandOffsetRatio(band: {
   readonly frequencyMhz: number;

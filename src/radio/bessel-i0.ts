@@ -18,7 +18,7 @@ const ARGUMENT_LIMITS: Limits = { min: 0, max: 10_000 };
  * @source              NIST Digital Library of Mathematical Functions, eq. 10.32.1; for the rule, section
  *                      3.5(i). From memory, to be verified.
  * @differs             none
- * @checkedBy           i0-at-1, i0-at-10, i0-at-1000
+ * @checkedBy           none published, see test
  */
 export function scaledI0(x: number): number {
   requireRange("scaledI0", ARGUMENT_LIMITS, { x });

@@ -19,7 +19,7 @@ const ARGUMENT_LIMITS: Limits = { min: 0, max: 6300 };
  * @source              NIST Digital Library of Mathematical Functions, eq. 10.9.1; for the rule, section
  *                      3.5(i). From memory, to be verified.
  * @differs             none
- * @checkedBy           j0-at-1, j0-at-5, j0-at-10
+ * @checkedBy           none published, see test
  */
 export function besselJ0(x: number): number {
   requireRange("besselJ0", ARGUMENT_LIMITS, { x });

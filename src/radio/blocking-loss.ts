@@ -8,8 +8,8 @@ import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
  *
  *     ΔG = 20·log10(2·(1 + y)^1.5 / (2 + y)), y = (10^0.1 − 1)·10^((P − P1dB) / 10)
  *
- * Assumes: the law of gainCompressionDb; the wanted carrier is far weaker, on another frequency. Not
- * for: receivers whose automatic gain control or selectivity acts before the amplifier.
+ * Assumes: the law of gainCompressionDb; the wanted carrier is far weaker, on another frequency.
+ * Not for: receivers whose automatic gain control or selectivity acts before the amplifier.
  *
  * @param blockerDbm           Strong carrier at the input. [dBm], −400 to 200
  * @param compressionPointDbm  1 dB compression point at the input. [dBm], −400 to 200
@@ -21,7 +21,7 @@ import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
  *                             Hard-limiting of two signals in random noise, IEEE Trans. Information Theory 9 (1963) 34,
  *                             as reported at microwavejournal.com/articles/3596, read 2026-12-01.
  * @differs                    The cubic law of textbooks agrees up to about 10 dB below the point and breaks down above it.
- * @checkedBy                  none published, see test
+ * @checkedBy           none published, see test
  */
 export function blockingLossDb(blockerDbm: number, compressionPointDbm: number): number {
   requireRange("blockingLossDb", LEVEL_LIMITS_DBM, { blockerDbm, compressionPointDbm });

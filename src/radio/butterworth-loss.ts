@@ -14,7 +14,7 @@ const EDGE_LOSS_LIMITS_DB: Limits = { min: 0.001, max: 100 };
  * Assumes: ideal parts. Real ones add insertion loss, most near the edges, and stop falling at 60 to
  * 90 dB (common practice, no source). Not for: filters by another design.
  *
- * @param filter.offsetRatio  Offset W from bandOffsetRatio. [none], 0 to 10²⁰
+ * @param filter.offsetRatio  Offset W from bandOffsetRatio. [none], 0 to 10⁴⁰
  * @param filter.order        Order of the low-pass behind it: resonators of the band-pass. [none], 1 to 20, whole
  * @param filter.edgeLossDb   Loss that defines the edges: 3.01 for half power. [dB], 0.001 to 100
  * @returns                   Loss above that in the middle. [dB], 0 or more
@@ -36,7 +36,5 @@ export function butterworthLossDb(filter: {
   requireRange("butterworthLossDb", OFFSET_RATIO_LIMITS, { offsetRatio });
   requireWhole("butterworthLossDb", FILTER_ORDER_LIMITS, { order });
   requireRange("butterworthLossDb", EDGE_LOSS_LIMITS_DB, { edgeLossDb });
-  // Small enough to square to nothing, yet with a logarithm.
-  const offset = Math.max(offsetRatio, Number.MIN_VALUE);
-  return onePlusDb(lessOneDb(edgeLossDb) + 20 * order * Math.log10(offset));
+  return onePlusDb(lessOneDb(edgeLossDb) + 20 * order * Math.log10(offsetRatio));
 }

@@ -11,7 +11,7 @@ import { requireWhole } from "./require-whole.ts";
  * Assumes: ideal parts, edges where the loss leaves the ripple for good; rippleEdges converts edges
  * that were stated at 3 dB. Not for: inverse Chebyshev and elliptic filters.
  *
- * @param filter.offsetRatio  Offset W from bandOffsetRatio. [none], 0 to 10²⁰
+ * @param filter.offsetRatio  Offset W from bandOffsetRatio. [none], 0 to 10⁴⁰
  * @param filter.order        Order of the low-pass behind it: resonators of the band-pass. [none], 1 to 20, whole
  * @param filter.rippleDb     Ripple within the band. [dB], 0.001 to 3
  * @returns                   Loss above the least in the band. [dB], 0 or more

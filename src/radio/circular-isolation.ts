@@ -18,7 +18,8 @@ const AXIAL_RATIO_LIMITS_DB: Limits = { min: 0.001, max: 100 };
  * @source              Table of axial ratio and cross-polar discrimination at satsig.net/axial.htm, read
  *                      2026-12-01; the formula follows from the two circular parts of an ellipse, (r ± 1) / 2.
  * @differs             Written with the hyperbolic tangent: (r − 1) / (r + 1) = tanh(½·ln r).
- * @checkedBy           satsig-0-3-db, satsig-0-51-db, satsig-0-83-db, satsig-1-01-db, satsig-1-58-db
+ * @checkedBy           satsig-0-3-db, satsig-0-51-db, satsig-0-83-db, satsig-1-01-db,
+ *                      satsig-1-58-db
  */
 export function circularIsolationDb(axialRatioDb: number): number {
   requireRange("circularIsolationDb", AXIAL_RATIO_LIMITS_DB, { axialRatioDb });

@@ -31,7 +31,7 @@ const CORRELATION_LIMITS: Limits = { min: 0, max: 0.999 };
  *                               term.
  * @differs                      The series instead of the Q functions, whose two terms are easily swapped
  *                               and cancel where the outage is small.
- * @checkedBy                    pair-0-7-at-20-db
+ * @checkedBy           pair-0-7-at-20-db
  */
 export function correlatedPairOutageProbability(pair: {
   readonly marginDb: number;

@@ -1,4 +1,5 @@
-import { interferenceToNoiseDb, noiseRiseDb } from "./noise-rise.ts";
+import { NOISE_RISE_LIMITS_DB } from "./noise-rise.ts";
+import { lessOneDb, onePlusDb } from "./one-plus-ratio.ts";
 import { requireRange } from "./require-range.ts";
 import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 
@@ -17,16 +18,16 @@ const STATED_LOSS_DB = 3;
  * @param blockerDbm        Strong carrier at the receiver's input. [dBm], −400 to 200
  * @param blockingLevelDbm  Blocker that costs 3 dB of sensitivity, as stated. [dBm], −400 to 200
  * @returns                 Loss of sensitivity. [dB], 0 or more
- * @throws RangeError       If an input lies outside its range or is NaN, or the two differ by over 400 dB.
+ * @throws RangeError       If an input lies outside its range or is NaN.
  * @accuracy                exact at the stated point; elsewhere as good as the assumption
  * @source                  CEPT, Monte Carlo simulation handbook, page 505674, desensitisation and blocking. Read at
  *                          ecowiki.atlassian.net, 2026-12-01. That 3 dB are usual: microwaves101.com, receiver blocking.
  * @differs                 none
- * @checkedBy               none published, see test
+ * @checkedBy           none published, see test
  */
 export function desensitisationDb(blockerDbm: number, blockingLevelDbm: number): number {
   requireRange("desensitisationDb", LEVEL_LIMITS_DBM, { blockerDbm, blockingLevelDbm });
-  return noiseRiseDb(blockerDbm - blockingLevelDbm + interferenceToNoiseDb(STATED_LOSS_DB));
+  return onePlusDb(blockerDbm - blockingLevelDbm + lessOneDb(STATED_LOSS_DB));
 }
 
 /**
@@ -43,9 +44,10 @@ export function desensitisationDb(blockerDbm: number, blockingLevelDbm: number):
  * @accuracy                as desensitisationDb
  * @source                  as desensitisationDb, solved for the blocker
  * @differs                 none
- * @checkedBy               none published, see test
+ * @checkedBy           none published, see test
  */
 export function blockerForLossDbm(lossDb: number, blockingLevelDbm: number): number {
   requireRange("blockerForLossDbm", LEVEL_LIMITS_DBM, { blockingLevelDbm });
-  return blockingLevelDbm + interferenceToNoiseDb(lossDb) - interferenceToNoiseDb(STATED_LOSS_DB);
+  requireRange("blockerForLossDbm", NOISE_RISE_LIMITS_DB, { lossDb });
+  return blockingLevelDbm + lessOneDb(lossDb) - lessOneDb(STATED_LOSS_DB);
 }

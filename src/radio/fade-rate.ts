@@ -36,7 +36,7 @@ export interface RayleighWalk {
  *                      biblioteca.sbrt.org.br/articles/3479, 2026-12-01. For independent branches it is
  *                      one line: the last of them falls below while all the others are below already.
  * @differs             none
- * @checkedBy           rappaport-5-7-rate, walking-rate-10-db, walking-rate-20-db
+ * @checkedBy           rappaport-5-7-rate, garg-3-6-rate, walking-rate-10-db, walking-rate-20-db
  */
 export function fadeRateHz(walk: RayleighWalk): number {
   const { marginDb, shiftHz, branchCount } = walk;
@@ -63,7 +63,8 @@ export function fadeRateHz(walk: RayleighWalk): number {
  *                      antennas are below cancels
  * @differs             none
  * @checkedBy           rappaport-5-8-r-0-01, rappaport-5-8-r-0-1, rappaport-5-8-r-1,
- *                      rappaport-5-9-r-0-707, singal-2-9-r-0-01, singal-2-9-r-1, walking-duration-10-db,
+ *                      rappaport-5-9-r-0-707, rappaport-5-9-r-0-1, singal-2-9-r-0-01,
+ *                      singal-2-9-r-0-1, singal-2-9-r-1, walking-duration-10-db,
  *                      walking-duration-20-db
  */
 export function fadeDurationS(walk: RayleighWalk): number {

@@ -20,7 +20,7 @@ const WANTED_LOSS_LIMITS_DB: Limits = { min: 0.001, max: 300 };
  * @source                D. M. Pozar, Microwave Engineering, example 8.4, p. 447. Read second-hand at
  *                        github.com/FOSSEE/Python-Textbook-Companions, 2026-12-01.
  * @differs               Read off a chart there; tried one by one here.
- * @checkedBy             none published, see test
+ * @checkedBy           none published, see test
  */
 export function smallestFilterOrder(
   wantedLossDb: number,

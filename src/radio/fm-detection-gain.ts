@@ -19,7 +19,7 @@ const INDEX_LIMITS: Limits = { min: 0.001, max: 1e6 };
  *                              versus AM; formula from memory, to be verified; example 6.5 read second-hand at
  *                              github.com/FOSSEE/Python-Textbook-Companions, 2026-12-01.
  * @differs                     none
- * @checkedBy                   none published, see test
+ * @checkedBy           none published, see test
  */
 export function fmDetectionGainDb(modulationIndexRatio: number): number {
   requireRange("fmDetectionGainDb", INDEX_LIMITS, { modulationIndexRatio });

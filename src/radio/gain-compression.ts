@@ -25,7 +25,7 @@ const COMPRESSION_LIMITS_DB: Limits = { min: 1e-6, max: 300 };
  *                             verified.
  * @differs                    Stated there by the saturation level; here by the 1 dB point, 5.87 dB above which lies
  *                             the input that would saturate a linear amplifier.
- * @checkedBy                  none published, see test
+ * @checkedBy           none published, see test
  */
 export function gainCompressionDb(levelDbm: number, compressionPointDbm: number): number {
   requireRange("gainCompressionDb", LEVEL_LIMITS_DBM, { levelDbm, compressionPointDbm });
@@ -46,7 +46,7 @@ export function gainCompressionDb(levelDbm: number, compressionPointDbm: number)
  * @accuracy                   as gainCompressionDb
  * @source                     as gainCompressionDb, solved for the level
  * @differs                    none
- * @checkedBy                  none published, see test
+ * @checkedBy           none published, see test
  */
 export function levelForCompressionDbm(compressionDb: number, compressionPointDbm: number): number {
   requireRange("levelForCompressionDbm", COMPRESSION_LIMITS_DB, { compressionDb });

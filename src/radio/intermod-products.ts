@@ -24,7 +24,6 @@ export interface IntermodSearch {
   readonly kinds: readonly IntermodKind[];
 }
 
-/** Wide enough that everything near a victim may be asked for. */
 const WITHIN_LIMITS_MHZ: Limits = { min: 0, max: FREQUENCY_LIMITS_MHZ.max };
 
 /**
@@ -69,7 +68,7 @@ export function intermodProducts(
  * @accuracy                  exact to the hertz
  * @source                    common practice, no source
  * @differs                   none
- * @checkedBy                 none published, see test
+ * @checkedBy           none published, see test
  */
 export function intermodHits(search: IntermodSearch): Generator<IntermodHit, void, undefined> {
   const carriers = rising("intermodHits", search.carriersMhz);
@@ -159,11 +158,8 @@ function targetsOf(caller: string, search: IntermodSearch): readonly Target[] {
       const victimHz = toHz(victimMhz);
       const lowHz = Math.max(0, victimHz - reachHz);
       const highHz = victimHz + reachHz;
-      const mirror = { lowHz: -highHz, highHz: Math.min(-1, -lowHz) };
-      return [
-        { victim, victimHz, lowHz, highHz },
-        { victim, victimHz, ...mirror },
-      ];
+      const direct = { victim, victimHz, lowHz, highHz };
+      return [direct, { ...direct, lowHz: -highHz, highHz: Math.min(-1, -lowHz) }];
     })
     .sort((a, b) => b.highHz - a.highHz);
 }
@@ -241,13 +237,10 @@ function productOf(
   last: number,
   carriers: readonly Carrier[],
 ): IntermodProduct | null {
-  const { first, second, sumHz, lastFactor } = head;
+  const { first, second } = head;
   if (last === first || last === second) return null;
   const members = [first, second, last].flatMap((place) => carriers[place ?? -1] ?? []);
-  const signedHz = sumHz - lastFactor * (carriers[last]?.hz ?? 0);
-  return {
-    kind,
-    frequencyMhz: Math.abs(signedHz) / 1e6,
-    carriers: members.map(({ place }) => place),
-  };
+  const signedHz = head.sumHz - head.lastFactor * (carriers[last]?.hz ?? 0);
+  const frequencyMhz = Math.abs(signedHz) / 1e6;
+  return { kind, frequencyMhz, carriers: members.map(({ place }) => place) };
 }

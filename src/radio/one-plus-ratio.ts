@@ -3,8 +3,7 @@ import { requireRange } from "./require-range.ts";
 
 /** 10 decibels make one neper of power times this: ln 10 / 10. */
 const NEPER_PER_DB = Math.LN10 / 10;
-/** What onePlusDb takes; 0 as a power ratio has no decibels, so −Infinity is not among them. */
-export const RATIO_LIMITS_DB: Limits = { min: -20_000, max: 20_000 };
+const RATIO_LIMITS_DB: Limits = { min: Number.NEGATIVE_INFINITY, max: 20_000 };
 const MORE_THAN_ONE_LIMITS_DB: Limits = { min: 1e-300, max: 20_000 };
 
 /**
@@ -14,7 +13,7 @@ const MORE_THAN_ONE_LIMITS_DB: Limits = { min: 1e-300, max: 20_000 };
  *
  * Assumes: powers that add, so no phase between them. Not for: two carriers on one frequency.
  *
- * @param ratioDb       Second power over the first. [dB], −20 000 to 20 000
+ * @param ratioDb       Second power over the first. [dB], −∞ (nothing added) to 20 000
  * @returns             Both together over the first. [dB], 0 or more
  * @throws RangeError   If the ratio lies outside that range or is NaN.
  * @accuracy            exact; neither a tiny nor a huge ratio is lost in rounding

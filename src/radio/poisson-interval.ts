@@ -26,9 +26,9 @@ export const CONFIDENCE_LIMITS: Limits = { min: 0.5, max: 0.9999 };
  *                               graphpad.com/support/faq, "How QuickCalcs computes the confidence interval of a
  *                               count", 2026-12-01.
  * @differs                      Gamma instead of chi-squared: half the value, half the degrees of freedom.
- * @checkedBy                    garwood-25-90-low, garwood-25-95-low, garwood-25-99-low, rate-test-5-low,
- *                               rate-test-8-low, rate-test-13-low, rate-15-in-400-low, garwood-1-low,
- *                               garwood-5-low, garwood-10-low, horse-kick-low, count-4-low
+ * @checkedBy           garwood-25-90-low, garwood-25-95-low, garwood-25-99-low, rate-test-5-low,
+ *                      rate-test-8-low, rate-test-13-low, rate-15-in-400-low, garwood-1-low,
+ *                      garwood-5-low, garwood-10-low, horse-kick-low, count-4-low
  */
 export function poissonLowCount(eventCount: number, confidenceProbability: number): number {
   requireWhole("poissonLowCount", EVENT_COUNT_LIMITS, { eventCount });
@@ -53,10 +53,10 @@ export function poissonLowCount(eventCount: number, confidenceProbability: numbe
  * @accuracy                     relative, 10⁻¹⁰
  * @source                       as poissonLowCount
  * @differs                      as poissonLowCount
- * @checkedBy                    garwood-25-90-high, garwood-25-95-high, garwood-25-99-high, rate-test-5-high,
- *                               rate-test-8-high, rate-test-13-high, rate-15-in-400-high, garwood-1-high,
- *                               garwood-5-high, garwood-10-high, horse-kick-high, count-4-high,
- *                               zero-count-two-sided, zero-count-one-sided
+ * @checkedBy           garwood-25-90-high, garwood-25-95-high, garwood-25-99-high,
+ *                      rate-test-5-high, rate-test-8-high, rate-test-13-high, rate-15-in-400-high,
+ *                      garwood-1-high, garwood-5-high, garwood-10-high, horse-kick-high,
+ *                      count-4-high, zero-count-two-sided, zero-count-one-sided
  */
 export function poissonHighCount(eventCount: number, confidenceProbability: number): number {
   requireWhole("poissonHighCount", EVENT_COUNT_LIMITS, { eventCount });

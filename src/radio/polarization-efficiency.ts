@@ -37,7 +37,7 @@ export const AXIS_RATIO_LIMITS: Limits = { min: -1, max: 1 };
  *                           example 2-17.1. Examples read second-hand at
  *                           github.com/FOSSEE/Python-Textbook-Companions, 2026-12-01.
  * @differs                  Books give a term in cos 2t beside ½; it has been turned into squares.
- * @checkedBy                balanis-2-11, mishra-2-3, kraus-2-17-1
+ * @checkedBy           balanis-2-11, mishra-2-3, kraus-2-17-1
  */
 export function polarizationEfficiencyRatio(wave: Polarization, antenna: Polarization): number {
   requireRange("polarizationEfficiencyRatio", TILT_LIMITS_DEG, {

@@ -35,9 +35,9 @@ export interface CrossPolarLimits {
  *                            be verified. Taking both limits together: common practice, no source; each
  *                            mixes the two polarizations, one after the other.
  * @differs                   none
- * @checkedBy                 kraus-21-5-1, turned-30-deg, turned-45-deg, turned-60-deg, turned-80-deg,
- *                            axial-1-db-to-linear-best, axial-3-db-to-linear-best,
- *                            axial-6-db-to-linear-best
+ * @checkedBy           kraus-21-5-1, turned-30-deg, turned-45-deg, turned-60-deg, turned-80-deg,
+ *                      axial-1-db-to-linear-best, axial-3-db-to-linear-best,
+ *                      axial-6-db-to-linear-best
  */
 export function polarizationLossDb(
   match: { readonly wave: Polarization; readonly antenna: Polarization } & CrossPolarLimits,

@@ -17,18 +17,18 @@ export interface FilteredLevels {
   readonly behindDbm: number;
 }
 
-const FILTER_LOSS_LIMITS_DB: Limits = { min: 0, max: 10_000 };
+const FILTER_LOSS_LIMITS_DB: Limits = { min: 0, max: 17_000 };
 
 /**
  * What a filter leaves of all that comes in at an antenna, one by one and together.
  *
  *     P = 10·log10(Σ 10^((Pi − A(fi)) / 10))
  *
- * Assumes: each entry narrow beside the filter's slope; entries unrelated, so that powers add. Not
- * for: a wide channel across an edge; cut it into slices.
+ * Assumes: each entry narrow beside the filter's slope; entries unrelated, so that powers add.
+ * Not for: a wide channel across an edge; cut it into slices.
  *
  * @param received      Frequency and level of each. [MHz], 0.003 to 3 000 000; [dBm], −400 to 200; at least one
- * @param lossAtDb      Loss of the filter at a frequency in MHz, insertion loss included. [dB], 0 to 10 000
+ * @param lossAtDb      Loss of the filter at a frequency in MHz, insertion loss included. [dB], 0 to 17 000
  * @returns             Levels behind the filter, and the sums before and behind it. [dBm]
  * @throws RangeError   If there is no entry, or a value lies outside its range or is NaN.
  * @accuracy            exact for the assumptions

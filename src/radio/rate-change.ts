@@ -72,7 +72,8 @@ export function rateDropProbability(counted: BeforeAndAfter): number {
  * @source              M. P. Fay, vignette of the R package rateratio.test (9 May 2022), section 1, read
  *                      second-hand at rdrr.io, 2026-12-01.
  * @differs             none
- * @checkedBy           rateratio-vignette-p, rate-test-p, dodder-conditional-p, six-and-none-p, five-and-none-p
+ * @checkedBy           rateratio-vignette-p, rate-test-p, dodder-conditional-p, six-and-none-p,
+ *                      five-and-none-p
  */
 export function rateChangeProbability(counted: BeforeAndAfter): number {
   requireCounts("rateChangeProbability", counted);
@@ -100,7 +101,7 @@ export function rateChangeProbability(counted: BeforeAndAfter): number {
  *                               in the case of the binomial, Biometrika 26 (1934), 404-413, from memory, to be
  *                               verified; as used in the vignette named at rateChangeProbability.
  * @differs                      none
- * @checkedBy                    rateratio-vignette-low
+ * @checkedBy           rateratio-vignette-low
  */
 export function lowRateRatio(counted: BeforeAndAfter, confidenceProbability: number): number {
   requireInterval("lowRateRatio", counted, confidenceProbability);
@@ -127,7 +128,7 @@ export function lowRateRatio(counted: BeforeAndAfter, confidenceProbability: num
  * @accuracy                     relative, 10⁻⁹
  * @source                       as lowRateRatio
  * @differs                      none
- * @checkedBy                    rateratio-vignette-high
+ * @checkedBy           rateratio-vignette-high
  */
 export function highRateRatio(counted: BeforeAndAfter, confidenceProbability: number): number {
   requireInterval("highRateRatio", counted, confidenceProbability);
@@ -163,7 +164,7 @@ function requireInterval(
  * @accuracy                     exact for the assumptions
  * @source                       as rateChangeProbability with no event after, solved for the time
  * @differs                      none
- * @checkedBy                    six-and-none-watch, five-and-none-watch
+ * @checkedBy           six-and-none-watch, five-and-none-watch
  */
 export function quietWatchRatio(beforeCount: number, confidenceProbability: number): number {
   requireWhole("quietWatchRatio", COUNT_TO_COMPARE_WITH_LIMITS, { beforeCount });

@@ -46,7 +46,7 @@ export function rayleighOutageProbability(marginDb: number): number {
  * @accuracy                 exact for the assumptions
  * @source                   as rayleighOutageProbability, solved for the margin
  * @differs                  none
- * @checkedBy                rayleigh-margin-1-percent, rayleigh-margin-0-1-percent
+ * @checkedBy           rayleigh-margin-1-percent, rayleigh-margin-0-1-percent
  */
 export function rayleighMarginDb(outageProbability: number): number {
   requireRange("rayleighMarginDb", BRANCH_OUTAGE_LIMITS, { outageProbability });

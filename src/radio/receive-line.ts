@@ -43,7 +43,7 @@ export interface LinePoint {
  *                             Communication Circuits, examples 2.10 and 2.11, read second-hand at
  *                             github.com/FOSSEE/Python-Textbook-Companions, 2026-12-01.
  * @differs                    none
- * @checkedBy                  none published, see test
+ * @checkedBy           none published, see test
  */
 export function alongLine(line: {
   readonly elements: readonly LineElement[];

@@ -26,7 +26,7 @@ export const K_FACTOR_LIMITS_DB: Limits = { min: -40, max: 25 };
  *                          distribution of the amplitude at mathworks.com/help/stats/rician-distribution.html,
  *                          read 2026-12-01.
  * @differs                 none
- * @checkedBy               rice-k-6-db, rice-k-9-db, rice-k-0-db
+ * @checkedBy           rice-k-6-db, rice-k-9-db, rice-k-0-db
  */
 export function riceOutageProbability(fading: {
   readonly marginDb: number;

@@ -39,7 +39,7 @@ export function selectionMeanGainDb(branchCount: number): number {
  * @accuracy                 exact for the assumptions
  * @source                   as selectionMarginDb, taken twice
  * @differs                  none
- * @checkedBy                selection-gain-1-percent, selection-gain-0-1-percent
+ * @checkedBy           selection-gain-1-percent, selection-gain-0-1-percent
  */
 export function selectionDiversityGainDb(outageProbability: number, branchCount: number): number {
   return (

@@ -23,8 +23,8 @@ export const BRANCH_COUNT_LIMITS: Limits = { min: 1, max: 8 };
  *                      section 7.10.1, example 7.4. Read second-hand at
  *                      github.com/FOSSEE/Python-Textbook-Companions, 2026-12-01; section from memory.
  * @differs             none
- * @checkedBy           rappaport-7-4-four-branches, garg-10-6-three-branches, goldsmith-7-1-two-branches,
- *                      goldsmith-7-1-three-branches
+ * @checkedBy           rappaport-7-4-four-branches, goldsmith-7-1-two-branches,
+ *                      two-branches-at-20-db
  */
 export function selectionOutageProbability(marginDb: number, branchCount: number): number {
   requireWhole("selectionOutageProbability", BRANCH_COUNT_LIMITS, { branchCount });
@@ -46,7 +46,7 @@ export function selectionOutageProbability(marginDb: number, branchCount: number
  * @accuracy                 exact for the assumptions
  * @source                   as selectionOutageProbability, solved for the margin
  * @differs                  none
- * @checkedBy                selection-margin-1-percent, selection-margin-0-1-percent
+ * @checkedBy           selection-margin-1-percent, selection-margin-0-1-percent
  */
 export function selectionMarginDb(outageProbability: number, branchCount: number): number {
   requireRange("selectionMarginDb", OUTAGE_LIMITS, { outageProbability });

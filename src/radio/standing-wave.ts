@@ -39,8 +39,8 @@ export function standingWavePeriodM(frequencyMhz: number): number {
  * @accuracy            exact for the assumptions
  * @source              as standingWavePeriodM
  * @differs             none
- * @checkedBy           blake-15-11-800-mhz, blake-15-11-1900-mhz, singal-2-4-900-mhz, singal-2-4-1900-mhz,
- *                      walking-null-interval
+ * @checkedBy           walking-null-interval, blake-15-11-800-mhz, blake-15-11-1900-mhz,
+ *                      singal-2-4-900-mhz, singal-2-4-1900-mhz
  */
 export function nullIntervalS(speedMPerS: number, frequencyMhz: number): number {
   requireRange("nullIntervalS", SPEED_LIMITS_M_PER_S, { speedMPerS });

@@ -24,7 +24,7 @@ const LINE_FIGURE_LIMITS_DB: Limits = { min: 0, max: 15_000 };
  * @source                Rec. ITU-R P.372, system noise factor, with the losses of antenna and line taken into fr; from
  *                        memory, to be verified.
  * @differs               none
- * @checkedBy             none published, see test
+ * @checkedBy           none published, see test
  */
 export function systemNoiseFigureDb(antennaNoiseDb: number, noiseFigureDb: number): number {
   requireRange("systemNoiseFigureDb", ANTENNA_NOISE_LIMITS_DB, { antennaNoiseDb });

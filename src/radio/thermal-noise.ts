@@ -22,7 +22,7 @@ export const REFERENCE_TEMPERATURE_K = 290;
  * @param bandwidthHz   Noise bandwidth of the receiver. [Hz], 1 to 10¹²
  * @returns             Available noise power. [dBm]
  * @throws RangeError   If an input lies outside its range or is NaN.
- * @accuracy            exact for the assumptions; below 0.3 % up to 2 GHz at 290 K, where h·f/2kT is 0.0002
+ * @accuracy            exact for the assumptions; the quantum term h·f / 2kT leaves out 0.02 % at 2 GHz and 290 K
  * @source              H. Nyquist, Thermal agitation of electric charge in conductors, Phys. Rev. 32 (1928) 110,
  *                      from memory, to be verified. Examples: CEPT, Monte Carlo simulation handbook, page 493997,
  *                      read at ecowiki.atlassian.net, 2026-12-01.

@@ -29,7 +29,7 @@ const SPACING_MAX_M = 1e6;
  *                               products, of which only the contents list was read at itu.int, 2026-12-01; the method
  *                               from memory, to be verified.
  * @differs                      Coupling there is measured; here it is that of free space.
- * @checkedBy                    none published, see test
+ * @checkedBy           none published, see test
  */
 export function transmitterProductDbm(pair: {
   readonly neighbourDbm: number;
@@ -66,7 +66,7 @@ export function transmitterProductDbm(pair: {
  * @accuracy                     as transmitterProductDbm
  * @source                       as transmitterProductDbm, solved for the spacing
  * @differs                      none
- * @checkedBy                    none published, see test
+ * @checkedBy           none published, see test
  */
 export function spacingForProductM(pair: {
   readonly neighbourDbm: number;

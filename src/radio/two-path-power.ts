@@ -22,7 +22,7 @@ const PHASE_LIMITS_DEG: Limits = { min: -36_000, max: 36_000 };
  *                         example 5.3, p. 190. Read second-hand at
  *                         github.com/FOSSEE/Python-Textbook-Companions, 2026-12-01.
  * @differs                Added as amplitudes (P = |a₁ + a₂·e^(iφ)|²), so that the sum cannot fall below 0.
- * @checkedBy              rappaport-5-3-in-phase, rappaport-5-3-apart
+ * @checkedBy           rappaport-5-3-in-phase, rappaport-5-3-apart
  */
 export function twoPathPowerMw(paths: {
   readonly firstDbm: number;

@@ -98,7 +98,8 @@ function equalAt(one: Swing, two: Swing): number[] {
  * @source                    as polarizationLossDb; the isolation limits all antennas alike, so that the
  *                            worst tilt stays where it is
  * @differs                   none
- * @checkedBy                 axial-1-db-to-linear-worst, axial-3-db-to-linear-worst, axial-6-db-to-linear-worst
+ * @checkedBy           axial-1-db-to-linear-worst, axial-3-db-to-linear-worst,
+ *                      axial-6-db-to-linear-worst
  */
 export function worstPolarizationLossDb(turn: AnyTilt & CrossPolarLimits): number {
   const { waveAxisRatio, antennas, isolationDb, crossRatioDb } = turn;

@@ -1,7 +1,8 @@
 import type { ComponentChildren } from "preact";
 import type { AppModels } from "../models/app-models.ts";
 import type { tabOf } from "../models/route.ts";
-import { noticeText, SHELL_TEXT } from "./text/shell.ts";
+import * as shellText from "./text/shell.ts";
+import { noticeText, PLACE_NAMES } from "./text/shell.ts";
 
 const PLACES = ["fault", "calculators", "rig", "log"] as const;
 
@@ -24,17 +25,17 @@ export function Dock(props: {
       <div class="dock-actions">
         {props.children}
         <button type="button" class="main" onClick={() => void fault.markDropout()}>
-          {hasOpenFault ? SHELL_TEXT.markAgain : SHELL_TEXT.mark}
+          {hasOpenFault ? shellText.markAgain : shellText.mark}
         </button>
       </div>
-      <nav class="places" aria-label={SHELL_TEXT.places}>
+      <nav class="places" aria-label={shellText.places}>
         {PLACES.map((place) => (
           <a
             key={place}
             href={`#/${place}`}
             aria-current={props.tab === place ? "page" : undefined}
           >
-            {SHELL_TEXT[place]}
+            {PLACE_NAMES[place]}
           </a>
         ))}
       </nav>

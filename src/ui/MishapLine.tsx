@@ -1,5 +1,5 @@
 import type { AppModels } from "../models/app-models.ts";
-import { SHELL_TEXT } from "./text/shell.ts";
+import * as shellText from "./text/shell.ts";
 
 export function MishapLine({ models }: { models: AppModels }) {
   const { mishap, log } = models;
@@ -7,12 +7,12 @@ export function MishapLine({ models }: { models: AppModels }) {
   if (details === null) return null;
   return (
     <div class="line-note warning" role="alert">
-      <p>{SHELL_TEXT.mishap}</p>
+      <p>{shellText.mishap}</p>
       <button type="button" onClick={() => void log.shareFile("fadewright-error", details)}>
-        {SHELL_TEXT.mishapShare}
+        {shellText.mishapShare}
       </button>
       <button type="button" onClick={mishap.hide}>
-        {SHELL_TEXT.mishapHide}
+        {shellText.mishapHide}
       </button>
     </div>
   );

@@ -18,11 +18,13 @@ import { Cautions } from "./settings/Cautions.tsx";
 import { Settings } from "./settings/Settings.tsx";
 import { ShowPage } from "./show/ShowPage.tsx";
 import { TopBar } from "./TopBar.tsx";
-import { CALCULATORS_TEXT, DISTANCE_TEXT } from "./text/calculators.ts";
-import { FAULT_TEXT } from "./text/fault.ts";
-import { LOG_TEXT, SHOW_TEXT } from "./text/log.ts";
-import { RIG_TEXT } from "./text/rig.ts";
-import { SETTINGS_TEXT } from "./text/settings.ts";
+import * as calculatorsText from "./text/calculators.ts";
+import * as distanceText from "./text/distance.ts";
+import * as faultText from "./text/fault.ts";
+import * as logText from "./text/log.ts";
+import * as rigText from "./text/rig.ts";
+import * as settingsText from "./text/settings.ts";
+import * as showText from "./text/show.ts";
 
 type Part = ComponentType<{ models: AppModels }>;
 interface Screen {
@@ -33,19 +35,19 @@ interface Screen {
 }
 
 const SCREENS: Readonly<Record<Route["place"], Screen>> = {
-  fault: { title: FAULT_TEXT.title, Content: FaultHome },
-  mark: { title: FAULT_TEXT.title, Content: FaultHome },
-  trace: { title: FAULT_TEXT.title, Content: FaultTrace },
-  steps: { title: FAULT_TEXT.otherTitle, Content: FaultSteps },
-  marks: { title: FAULT_TEXT.marksTitle, Content: FaultMarks },
-  close: { title: FAULT_TEXT.closeTitle, Content: FaultClose },
-  calculators: { title: CALCULATORS_TEXT.title, Content: CalculatorList },
-  distance: { title: DISTANCE_TEXT.title, Content: Distance, Action: KeepDistance },
-  rig: { title: RIG_TEXT.title, Content: RigPage },
-  log: { title: LOG_TEXT.title, Content: LogPage },
-  show: { title: SHOW_TEXT.title, Content: ShowPage },
-  settings: { title: SETTINGS_TEXT.title, Content: Settings },
-  cautions: { title: SETTINGS_TEXT.cautions, Content: Cautions },
+  fault: { title: faultText.title, Content: FaultHome },
+  mark: { title: faultText.title, Content: FaultHome },
+  trace: { title: faultText.title, Content: FaultTrace },
+  steps: { title: faultText.otherTitle, Content: FaultSteps },
+  marks: { title: faultText.marksTitle, Content: FaultMarks },
+  close: { title: faultText.closeTitle, Content: FaultClose },
+  calculators: { title: calculatorsText.title, Content: CalculatorList },
+  distance: { title: distanceText.title, Content: Distance, Action: KeepDistance },
+  rig: { title: rigText.title, Content: RigPage },
+  log: { title: logText.title, Content: LogPage },
+  show: { title: showText.title, Content: ShowPage },
+  settings: { title: settingsText.title, Content: Settings },
+  cautions: { title: settingsText.cautions, Content: Cautions },
 };
 
 /** The frame of every screen: top line, the screen itself, and the dock at the thumb. */

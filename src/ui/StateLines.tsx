@@ -1,6 +1,7 @@
 import type { AppModels } from "../models/app-models.ts";
 import { MishapLine } from "./MishapLine.tsx";
-import { failureText, newerText, notStoredText, SHELL_TEXT, setAsideText } from "./text/shell.ts";
+import * as shellText from "./text/shell.ts";
+import { failureText, newerText, notStoredText, setAsideText } from "./text/shell.ts";
 
 /** What the user has to know about the log or the version; nothing while all is well. */
 export function StateLines({ models }: { models: AppModels }) {
@@ -12,8 +13,8 @@ export function StateLines({ models }: { models: AppModels }) {
   return (
     <>
       <MishapLine models={models} />
-      {journal.phase.value === "loading" && <p class="soft">{SHELL_TEXT.reading}</p>}
-      {journal.isReplaced.value && <Line text={SHELL_TEXT.replaced} isWarning />}
+      {journal.phase.value === "loading" && <p class="soft">{shellText.reading}</p>}
+      {journal.isReplaced.value && <Line text={shellText.replaced} isWarning />}
       {failure !== null && (
         <div class="line-note warning" role="alert">
           <p>
@@ -21,14 +22,14 @@ export function StateLines({ models }: { models: AppModels }) {
             {failureText(failure)}
           </p>
           <button type="button" onClick={() => void journal.retry()}>
-            {SHELL_TEXT.retry}
+            {shellText.retry}
           </button>
           {unsaved.length > 0 && (
             <button
               type="button"
               onClick={() => void models.log.shareFile("unsaved", JSON.stringify(unsaved, null, 1))}
             >
-              {SHELL_TEXT.copyUnsaved}
+              {shellText.copyUnsaved}
             </button>
           )}
         </div>
@@ -37,13 +38,13 @@ export function StateLines({ models }: { models: AppModels }) {
       {newer > 0 && <Line text={newerText(newer)} />}
       {offline.canOffer.value && (
         <div class="line-note">
-          <p>{SHELL_TEXT.update}</p>
+          <p>{shellText.update}</p>
           <button type="button" onClick={offline.takeUpdate}>
-            {SHELL_TEXT.updateNow}
+            {shellText.updateNow}
           </button>
         </div>
       )}
-      {offline.isTakenElsewhere.value && <Line text={SHELL_TEXT.takenElsewhere} />}
+      {offline.isTakenElsewhere.value && <Line text={shellText.takenElsewhere} />}
     </>
   );
 }
@@ -52,7 +53,7 @@ function Line(props: { text: string; isWarning?: boolean; hasLink?: boolean }) {
   return (
     <p class={props.isWarning ? "line-note warning" : "line-note"}>
       <span>
-        {props.text} {props.hasLink && <a href="#/settings">{SHELL_TEXT.toSettings}</a>}
+        {props.text} {props.hasLink && <a href="#/settings">{shellText.toSettings}</a>}
       </span>
     </p>
   );

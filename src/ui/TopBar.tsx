@@ -1,17 +1,17 @@
 import type { AppModels } from "../models/app-models.ts";
-import { SHELL_TEXT } from "./text/shell.ts";
+import * as shellText from "./text/shell.ts";
 
 export function TopBar({ models, title }: { models: AppModels; title: string }) {
   const show = models.journal.openShow.value;
-  const name = show === null ? SHELL_TEXT.noShow : show.name || SHELL_TEXT.unnamedShow;
+  const name = show === null ? shellText.noShow : show.name || shellText.unnamedShow;
   return (
     <header class="top">
       <h1>{title}</h1>
-      <nav class="top-links" aria-label={SHELL_TEXT.aside}>
+      <nav class="top-links" aria-label={shellText.aside}>
         <a class="top-show" href="#/show">
           {name}
         </a>
-        <a href="#/settings">{SHELL_TEXT.settings}</a>
+        <a href="#/settings">{shellText.settings}</a>
       </nav>
     </header>
   );

@@ -109,6 +109,20 @@ test.describe("use without network", () => {
     await expect(field(page, "readiness")).toHaveText("failed");
   });
 
+  test("works from a host that says that its files vary", async ({ page, site }) => {
+    site.intercept = (_path, response) => {
+      response.setHeader("vary", "accept, origin");
+      return false;
+    };
+    await page.goto(site.url);
+    await expectReady(page, "first");
+    await site.stop();
+    await page.reload();
+    await expectReady(page, "first");
+    await press(page, "late");
+    await expect(field(page, "late")).toHaveText("late part of first");
+  });
+
   test("works from a host that redirects the page to its folder", async ({ page, site }) => {
     site.intercept = (path, response) => {
       if (path !== "/index.html") return false;

@@ -134,6 +134,25 @@ test.describe("an open show", () => {
     expect(await cacheNames(last)).toHaveLength(1);
   });
 
+  test("is taken to go on while the database does not answer", async ({
+    openBrowser,
+    site,
+    pages,
+  }) => {
+    const { page, kill } = await openBrowser();
+    await withWaiting(page, site, pages.second);
+    await lockShow(page);
+    await kill();
+    const { page: held } = await openBrowser();
+    await held.goto(site.url);
+    await expectReady(held, "first");
+    const other = await held.context().newPage();
+    await other.goto(site.url);
+    await occupyDatabase(other);
+    await held.reload();
+    await expectReady(held, "first");
+  });
+
   test("does not stand against the user's own tap", async ({ page, site, pages }) => {
     await withWaiting(page, site, pages.second);
     await lockShow(page);

@@ -1,3 +1,5 @@
+import { cp, rm } from "node:fs/promises";
+import { join } from "node:path";
 import { expect } from "./fixtures.ts";
 import {
   cacheNames,
@@ -187,6 +189,34 @@ test.describe("a new version", () => {
     await site.stop();
     await page.reload();
     await expectReady(page, "third");
+  });
+
+  test("of one copy of the app leaves a copy in another folder as it is", async ({
+    context,
+    page,
+    site,
+    pages,
+  }) => {
+    await cp(pages.first, join(site.folder, "copy"), { recursive: true });
+    await page.goto(`${site.url}/copy/`);
+    await expectReady(page, "first");
+    const other = await context.newPage();
+    await other.goto(site.url);
+    await expectReady(other, "first");
+    expect(await cacheNames(page)).toHaveLength(2);
+    await other.close();
+
+    await rm(join(site.folder, "copy"), { recursive: true });
+    await cp(pages.second, join(site.folder, "copy"), { recursive: true });
+    await check(page, "found");
+    await press(page, "take");
+    await expectReady(page, "second");
+    expect(await cacheNames(page)).toHaveLength(2);
+    await site.stop();
+    await page.goto(site.url);
+    await expectReady(page, "first");
+    await page.goto(`${site.url}/copy/#/log`);
+    await expectReady(page, "second");
   });
 
   test("touches no caches of others on the same origin", async ({ page, site, pages }) => {

@@ -1,27 +1,25 @@
 import { describe, expect, it } from "vitest";
 import { foldJournal } from "../../src/journal/fold.ts";
 import { RECORD_TYPES, type RecordType } from "../../src/journal/records.ts";
-import { entryLine, type ReportWording, showText } from "../../src/journal/report.ts";
+import { entryLine, type Known, type ReportWording, showText } from "../../src/journal/report.ts";
 import type { ShowView } from "../../src/journal/views.ts";
 import { BODY, START_MS, writeJournal } from "./samples.ts";
 
 const said = (name: string, words: object = {}) => `<${name} ${JSON.stringify(words)}>`;
-const names = RECORD_TYPES.map((type) => [type, (words?: object) => said(type, words)]);
+/** The sentence of a test names all that it was given, and what it asked of the show. */
+const names = RECORD_TYPES.map((type) => [
+  type,
+  ({ fault: _f, record: _r, at: _a, ...body }: Record<string, unknown>, known: Known) => {
+    if (type === "link.removed") return said(type, { name: known.linkName(String(body["link"])) });
+    if (type !== "dropout.detailed") return said(type, body);
+    const { mark, links, place } = body as { mark: string; links: string[]; place: unknown };
+    return said(type, { time: known.markTime(mark), links: links.map(known.linkName), place });
+  },
+]);
 const wording: ReportWording = {
   time: (at, timeZone) =>
     new Intl.DateTimeFormat("en-GB", { timeZone, hour: "2-digit", minute: "2-digit" }).format(at),
   date: (at, timeZone) => new Intl.DateTimeFormat("en-CA", { timeZone }).format(at),
-  causeName: (cause) => `cause:${cause}`,
-  checkQuestion: (check) => `check:${check}`,
-  outcomeLabel: (check, outcome) => `outcome:${check}:${outcome}`,
-  remedyTitle: (remedy) => `remedy:${remedy}`,
-  stepTitle: (step) => `step:${step}`,
-  calculatorName: (calculator) => `calculator:${calculator}`,
-  linkKind: (kind) => `kind:${kind}`,
-  moment: (moment) => `moment:${moment}`,
-  place: (place) => `place:${place}`,
-  trialResult: (result) => `result:${result}`,
-  ending: (ending) => `ending:${ending}`,
   unknownLink: "unknown link",
   entry: Object.fromEntries(names),
   title: (words) => said("title", words),
@@ -56,26 +54,30 @@ const SENTENCE: Record<Exclude<RecordType, "record.withdrawn">, object> = {
   "show.opened": BODY["show.opened"],
   "show.edited": BODY["show.edited"],
   "show.closed": {},
-  "moment.set": { moment: "moment:live" },
-  "link.set": { name: "Lead vocal", kind: "kind:handheld", frequencyMhz: 614.4 },
+  "moment.set": { moment: "live" },
+  "link.set": { link: "l1", name: "Lead vocal", kind: "handheld", frequencyMhz: 614.4 },
   "link.removed": { name: "Lead vocal" },
-  "fault.opened": { moment: "moment:live" },
+  "fault.opened": { moment: "live" },
   "dropout.marked": {},
   "dropout.detailed": {
     time: "23:34",
     links: ["Lead vocal", "unknown link"],
-    place: "place:up-left",
+    place: "up-left",
   },
-  "check.answered": { question: "check:c1", outcome: "outcome:c1:yes" },
-  "step.skipped": { step: "step:c2" },
-  "remedy.tried": { remedy: "remedy:r1", result: "result:better" },
+  "check.answered": { check: "c1", outcome: "yes" },
+  "step.skipped": { step: "c2" },
+  "remedy.tried": { remedy: "r1", result: "better" },
   "fault.closed": {
-    causes: ["cause:k1"],
-    ending: "ending:cured",
-    remedy: "remedy:r1",
+    causes: ["k1"],
+    ending: "cured",
+    remedy: "r1",
     note: "Swapped.",
   },
-  "sum.kept": { calculator: "calculator:distance", sentence: "30 m costs 57.7 dB." },
+  "sum.kept": {
+    calculator: "distance",
+    query: BODY["sum.kept"].query,
+    sentence: "30 m costs 57.7 dB.",
+  },
   "note.added": { text: "Second line array is new." },
 };
 
@@ -122,16 +124,16 @@ describe("showText", () => {
   it("lists the links, and each fault with its marks and its verdict", () => {
     const { add, records, view } = fullShow();
     const open = add("fault.opened", { moment: "between" });
-    const link = { name: "Bass", kind: "kind:in-ear", frequencyMhz: null };
+    const link = { link: "l2", name: "Bass", kind: "in-ear", frequencyMhz: null };
     add("link.set", { link: "l2", name: "Bass", kind: "in-ear", frequencyMhz: null });
     const head = showText(view(), wording).split("\n\n");
     expect(head[1]).toBe(`<links>\n- ${said("link.set", link)}`);
-    const first = { number: 1, date: "2026-12-01", time: "23:33", moment: "moment:live" };
+    const first = { number: 1, date: "2026-12-01", time: "23:33", moment: "live" };
     const { "dropout.detailed": mark, "fault.closed": verdict } = SENTENCE;
     expect(head[2]).toBe(
       `${said("fault", first)}\n- ${said("mark", mark)}\n- ${said("fault.closed", verdict)}`,
     );
-    const second = { number: 2, date: "2026-12-01", time: "23:45", moment: "moment:between" };
+    const second = { number: 2, date: "2026-12-01", time: "23:45", moment: "between" };
     expect(head[3]).toBe(`${said("fault", second)}\n- <still open>`);
     expect(records).toContain(open);
   });

@@ -1,16 +1,16 @@
-import { CALCULATORS_TEXT } from "../text/calculators.ts";
+import * as calculatorsText from "../text/calculators.ts";
 
 export function CalculatorList() {
   return (
     <div class="stack">
-      <p>{CALCULATORS_TEXT.purpose}</p>
+      <p>{calculatorsText.purpose}</p>
       <ul>
         <li>
           <a class="button wide choice" href="#/calculators/distance">
             <span>
-              <strong>{CALCULATORS_TEXT.distance}</strong>
+              <strong>{calculatorsText.distance}</strong>
               <br />
-              {CALCULATORS_TEXT.distanceHint}
+              {calculatorsText.distanceHint}
             </span>
           </a>
         </li>

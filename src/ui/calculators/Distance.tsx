@@ -1,15 +1,16 @@
 import type { AppModels } from "../../models/app-models.ts";
 import { EXPONENT_PRESETS } from "../../models/vocabulary.ts";
 import { Stepper } from "../parts/Stepper.tsx";
+import * as calculatorsText from "../text/calculators.ts";
+import * as distanceText from "../text/distance.ts";
 import {
-  CALCULATORS_TEXT,
   changeMeaning,
-  DISTANCE_TEXT,
   distanceCautionText,
+  FIELD_LABEL,
   noAnswerText,
   PRESET_TEXT,
   wishText,
-} from "../text/calculators.ts";
+} from "../text/distance.ts";
 import { decibels } from "../text/format.ts";
 import { DistancePicture } from "./DistancePicture.tsx";
 
@@ -22,7 +23,7 @@ export function Distance({ models }: { models: AppModels }) {
   const stepper = (id: keyof typeof fields) => (
     <Stepper
       key={id}
-      label={DISTANCE_TEXT[id]}
+      label={FIELD_LABEL[id]}
       state={fields[id]}
       unit={unit}
       onType={(text) => model.type(id, text)}
@@ -38,12 +39,12 @@ export function Distance({ models }: { models: AppModels }) {
             {isOk
               ? changeMeaning(outcome.changeDb)
               : outcome === null
-                ? DISTANCE_TEXT.blank
+                ? distanceText.blank
                 : noAnswerText(outcome.reason, outcome.nearZoneM, unit)}
           </span>
         </output>
         <button type="button" onClick={model.reset}>
-          {CALCULATORS_TEXT.reset}
+          {calculatorsText.reset}
         </button>
       </div>
       <div class="pair">
@@ -54,7 +55,7 @@ export function Distance({ models }: { models: AppModels }) {
         {stepper("wishedGainDb")}
         <div>
           <label class="field-label" for="surroundings">
-            {DISTANCE_TEXT.surroundings}
+            {distanceText.surroundings}
           </label>
           <select
             id="surroundings"
@@ -62,7 +63,7 @@ export function Distance({ models }: { models: AppModels }) {
             value={model.preset.value ?? ""}
             onChange={(event) => model.pickPreset(event.currentTarget.value)}
           >
-            {model.preset.value === null && <option value="">{DISTANCE_TEXT.ownExponent}</option>}
+            {model.preset.value === null && <option value="">{distanceText.ownExponent}</option>}
             {EXPONENT_PRESETS.map(({ id }) => (
               <option key={id} value={id}>
                 {PRESET_TEXT[id]}

@@ -1,6 +1,6 @@
 import type { DistanceCurve } from "../../calculators/distance/picture.ts";
 import type { LengthUnit } from "../../calculators/field.ts";
-import { DISTANCE_TEXT } from "../text/calculators.ts";
+import { FIELD_LABEL } from "../text/distance.ts";
 import { decibels, lengthIn } from "../text/format.ts";
 
 const WIDTH = 320;
@@ -24,8 +24,8 @@ export function DistancePicture({ curve, unit }: { curve: DistanceCurve; unit: L
     TOP + ((first.changeDb - changeDb) / spanDb) * (BOTTOM - TOP);
   const path = points.map((p) => `${x(p.distanceM).toFixed(1)},${y(p.changeDb).toFixed(1)}`);
   const places = [
-    { name: DISTANCE_TEXT.fromM, point: from, isTo: false },
-    { name: DISTANCE_TEXT.toM, point: to, isTo: true },
+    { name: FIELD_LABEL.fromM, point: from, isTo: false },
+    { name: FIELD_LABEL.toM, point: to, isTo: true },
   ];
   const summary = places
     .map(

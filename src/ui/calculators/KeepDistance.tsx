@@ -1,5 +1,6 @@
 import type { AppModels } from "../../models/app-models.ts";
-import { CALCULATORS_TEXT, distanceSentence } from "../text/calculators.ts";
+import * as calculatorsText from "../text/calculators.ts";
+import { distanceSentence } from "../text/distance.ts";
 
 /** Drops the result into the log, as the sentence that one would say. */
 export function KeepDistance({ models }: { models: AppModels }) {
@@ -12,7 +13,7 @@ export function KeepDistance({ models }: { models: AppModels }) {
   };
   return (
     <button type="button" class="tall" aria-disabled={outcome?.kind !== "ok"} onClick={keep}>
-      {CALCULATORS_TEXT.keep}
+      {calculatorsText.keep}
     </button>
   );
 }

@@ -2,7 +2,8 @@ import type { ComponentChildren } from "preact";
 import type { AppModels } from "../../models/app-models.ts";
 import { ENDINGS } from "../../models/vocabulary.ts";
 import { DraftField } from "../parts/DraftField.tsx";
-import { ENDING_TEXT, FAULT_TEXT } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { ENDING_TEXT } from "../text/fault.ts";
 import { FaultGone } from "./FaultGone.tsx";
 
 /** The verdict: how it ended, what it was, what helped. Filled in from the evidence, changed by tap. */
@@ -12,7 +13,7 @@ export function FaultClose({ models }: { models: AppModels }) {
   const words = models.expertise.words.value;
   return (
     <div class="stack">
-      <Choices title={FAULT_TEXT.closeEnding}>
+      <Choices title={faultText.closeEnding}>
         {ENDINGS.map((ending) => (
           <Choice
             key={ending}
@@ -22,7 +23,7 @@ export function FaultClose({ models }: { models: AppModels }) {
           />
         ))}
       </Choices>
-      <Choices title={FAULT_TEXT.closeCause}>
+      <Choices title={faultText.closeCause}>
         {model.offered.value.map((cause) => (
           <Choice
             key={cause}
@@ -32,13 +33,13 @@ export function FaultClose({ models }: { models: AppModels }) {
           />
         ))}
         <Choice
-          text={FAULT_TEXT.closeCauseUnknown}
+          text={faultText.closeCauseUnknown}
           isChosen={model.cause.value === null}
           onPick={() => model.pickCause(null)}
         />
       </Choices>
       {model.helped.value.length > 0 && (
-        <Choices title={FAULT_TEXT.closeRemedy}>
+        <Choices title={faultText.closeRemedy}>
           {model.helped.value.map((remedy) => (
             <Choice
               key={remedy}
@@ -48,7 +49,7 @@ export function FaultClose({ models }: { models: AppModels }) {
             />
           ))}
           <Choice
-            text={FAULT_TEXT.closeRemedyNone}
+            text={faultText.closeRemedyNone}
             isChosen={model.remedy.value === null}
             onPick={() => model.pickRemedy(null)}
           />
@@ -56,13 +57,13 @@ export function FaultClose({ models }: { models: AppModels }) {
       )}
       <DraftField
         id="closing-note"
-        label={FAULT_TEXT.closeNote}
+        label={faultText.closeNote}
         draft={model.note}
         lines="some"
-        problem={model.isNoteTooLong.value ? FAULT_TEXT.noteTooLong : null}
+        problem={model.isNoteTooLong.value ? faultText.noteTooLong : null}
       />
       <button type="button" class="wide tall" onClick={() => void model.close()}>
-        {FAULT_TEXT.closeDo}
+        {faultText.closeDo}
       </button>
     </div>
   );

@@ -1,11 +1,11 @@
-import { FAULT_TEXT } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
 
 export function FaultGone() {
   return (
     <div class="stack">
-      <p>{FAULT_TEXT.gone}</p>
+      <p>{faultText.gone}</p>
       <a class="button wide" href="#/fault">
-        {FAULT_TEXT.toFaults}
+        {faultText.toFaults}
       </a>
     </div>
   );

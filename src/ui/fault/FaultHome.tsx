@@ -2,7 +2,8 @@ import type { FaultView, ShowView } from "../../journal/views.ts";
 import type { AppModels } from "../../models/app-models.ts";
 import type { Words } from "../../models/words.ts";
 import { MarkStrip } from "../parts/MarkStrip.tsx";
-import { ENDING_TEXT, FAULT_TEXT, markCount } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { ENDING_TEXT, markCount } from "../text/fault.ts";
 import { timeOf } from "../text/format.ts";
 import { MomentPicker } from "./MomentPicker.tsx";
 
@@ -11,9 +12,9 @@ export function FaultHome({ models }: { models: AppModels }) {
   if (show === null)
     return (
       <div class="stack">
-        <p>{FAULT_TEXT.purpose}</p>
+        <p>{faultText.purpose}</p>
         <a class="button wide" href="#/show">
-          {FAULT_TEXT.openShow}
+          {faultText.openShow}
         </a>
       </div>
     );
@@ -23,14 +24,14 @@ export function FaultHome({ models }: { models: AppModels }) {
   return (
     <div class="stack">
       <MomentPicker fault={models.fault} />
-      {show.faults.length === 0 && <p>{FAULT_TEXT.purpose}</p>}
-      {show.faults.length === 0 && <p class="soft">{FAULT_TEXT.noFaults}</p>}
+      {show.faults.length === 0 && <p>{faultText.purpose}</p>}
+      {show.faults.length === 0 && <p class="soft">{faultText.noFaults}</p>}
       {open.length > 0 && (
-        <FaultList title={FAULT_TEXT.openFaults} faults={open} show={show} words={words} />
+        <FaultList title={faultText.openFaults} faults={open} show={show} words={words} />
       )}
       {closed.length > 0 && (
         <FaultList
-          title={FAULT_TEXT.closedFaults}
+          title={faultText.closedFaults}
           faults={[...closed].reverse()}
           show={show}
           words={words}
@@ -55,7 +56,7 @@ function FaultList(props: {
             <MarkStrip marks={fault.marks} timeZone={props.show.timeZone} />
             <a class="button wide" href={`#/fault/${fault.id}`}>
               {fault.verdict === null
-                ? `${FAULT_TEXT.trace} (${markCount(fault.marks.length)})`
+                ? `${faultText.trace} (${markCount(fault.marks.length)})`
                 : verdictLine(fault, props.show.timeZone, props.words)}
             </a>
           </li>
@@ -68,6 +69,6 @@ function FaultList(props: {
 function verdictLine({ verdict }: FaultView, timeZone: string, words: Words): string {
   if (verdict === null) return "";
   const causes = verdict.causes.map(words.causeName).join(" + ");
-  const what = causes === "" ? FAULT_TEXT.closeCauseUnknown : causes;
+  const what = causes === "" ? faultText.closeCauseUnknown : causes;
   return `${timeOf(verdict.at, timeZone)} ${ENDING_TEXT[verdict.ending]}: ${what}`;
 }

@@ -2,7 +2,8 @@ import type { LinkView, MarkView } from "../../journal/views.ts";
 import type { AppModels } from "../../models/app-models.ts";
 import type { FaultModel } from "../../models/fault-model.ts";
 import { PLACES } from "../../models/vocabulary.ts";
-import { FAULT_TEXT, PLACE_TEXT } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { PLACE_TEXT } from "../text/fault.ts";
 import { timeOf } from "../text/format.ts";
 import { FaultGone } from "./FaultGone.tsx";
 
@@ -13,7 +14,7 @@ export function FaultMarks({ models }: { models: AppModels }) {
   const { fault, show } = traced;
   return (
     <div class="stack">
-      {show.links.length === 0 && <p class="soft">{FAULT_TEXT.marksNoLinks}</p>}
+      {show.links.length === 0 && <p class="soft">{faultText.marksNoLinks}</p>}
       {[...fault.marks].reverse().map((mark) => (
         <Mark
           key={mark.id}
@@ -24,7 +25,7 @@ export function FaultMarks({ models }: { models: AppModels }) {
         />
       ))}
       <a class="button wide tall" href={`#/fault/${fault.id}`}>
-        {FAULT_TEXT.done}
+        {faultText.done}
       </a>
     </div>
   );
@@ -58,7 +59,7 @@ function Mark(props: {
           </button>
         ))}
       </div>
-      <p class="soft">{FAULT_TEXT.stage}</p>
+      <p class="soft">{faultText.stage}</p>
       <div class="stage">
         {PLACES.map((place) => (
           <button

@@ -1,5 +1,6 @@
 import type { AppModels } from "../../models/app-models.ts";
-import { FAULT_TEXT } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { STEP_KIND_TEXT } from "../text/fault.ts";
 import { FaultGone } from "./FaultGone.tsx";
 
 const KINDS = ["remedy", "check"] as const;
@@ -12,13 +13,13 @@ export function FaultSteps({ models }: { models: AppModels }) {
   const steps = model.steps.value;
   return (
     <div class="stack">
-      {steps.length === 0 && <p>{FAULT_TEXT.otherNone}</p>}
+      {steps.length === 0 && <p>{faultText.otherNone}</p>}
       {KINDS.map((kind) => {
         const ofKind = steps.filter((step) => step.kind === kind);
         return (
           ofKind.length > 0 && (
             <section key={kind} class="stack">
-              <h2>{FAULT_TEXT[kind]}</h2>
+              <h2>{STEP_KIND_TEXT[kind]}</h2>
               <div class="answers">
                 {ofKind.map((step) => (
                   <button key={step.id} type="button" onClick={() => model.pick(step)}>
@@ -31,7 +32,7 @@ export function FaultSteps({ models }: { models: AppModels }) {
         );
       })}
       <a class="button wide" href={`#/fault/${traced.fault.id}`}>
-        {FAULT_TEXT.back}
+        {faultText.back}
       </a>
     </div>
   );

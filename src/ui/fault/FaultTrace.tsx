@@ -1,7 +1,7 @@
 import type { AppModels } from "../../models/app-models.ts";
 import type { ExpertiseModel } from "../../models/expertise-model.ts";
 import { MarkStrip } from "../parts/MarkStrip.tsx";
-import { FAULT_TEXT } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
 import { FaultGone } from "./FaultGone.tsx";
 import { GivenAnswers } from "./GivenAnswers.tsx";
 import { MomentPicker } from "./MomentPicker.tsx";
@@ -21,7 +21,7 @@ export function FaultTrace({ models }: { models: AppModels }) {
           <MarkStrip marks={fault.marks} timeZone={show.timeZone} />
         </div>
         <a class="button" href={`#/fault/${fault.id}/marks`}>
-          {FAULT_TEXT.marks}
+          {faultText.marks}
         </a>
       </div>
       <MomentPicker fault={model} />
@@ -39,12 +39,12 @@ export function FaultTrace({ models }: { models: AppModels }) {
 }
 
 function Unread({ expertise }: { expertise: ExpertiseModel }) {
-  if (expertise.phase.value === "loading") return <p class="soft">{FAULT_TEXT.reading}</p>;
+  if (expertise.phase.value === "loading") return <p class="soft">{faultText.reading}</p>;
   return (
     <section class="card stack" role="alert">
-      <p>{FAULT_TEXT.unread}</p>
+      <p>{faultText.unread}</p>
       <button type="button" onClick={() => void expertise.load()}>
-        {FAULT_TEXT.readAgain}
+        {faultText.readAgain}
       </button>
     </section>
   );

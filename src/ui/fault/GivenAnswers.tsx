@@ -1,7 +1,8 @@
 import type { FaultView } from "../../journal/views.ts";
 import type { FaultModel } from "../../models/fault-model.ts";
 import { CANT_TELL } from "../../models/vocabulary.ts";
-import { FAULT_TEXT, RESULT_TEXT } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { RESULT_TEXT } from "../text/fault.ts";
 
 /** What has been answered and tried, each to be taken back: everything is worked out anew then. */
 export function GivenAnswers({ model, fault }: { model: FaultModel; fault: FaultView }) {
@@ -11,7 +12,7 @@ export function GivenAnswers({ model, fault }: { model: FaultModel; fault: Fault
       record,
       at,
       title: words.question(check),
-      what: outcome === CANT_TELL ? FAULT_TEXT.cantTell : words.outcome(check, outcome),
+      what: outcome === CANT_TELL ? faultText.cantTell : words.outcome(check, outcome),
     })),
     ...fault.trials.map(({ record, at, remedy, result }) => ({
       record,
@@ -23,7 +24,7 @@ export function GivenAnswers({ model, fault }: { model: FaultModel; fault: Fault
   if (given.length === 0) return null;
   return (
     <section>
-      <h2>{FAULT_TEXT.given}</h2>
+      <h2>{faultText.given}</h2>
       <ul class="entries">
         {given.map(({ record, title, what }) => (
           <li key={record} class="row nowrap">
@@ -34,10 +35,10 @@ export function GivenAnswers({ model, fault }: { model: FaultModel; fault: Fault
             </span>
             <button
               type="button"
-              aria-label={`${FAULT_TEXT.takeBack}: ${title}`}
+              aria-label={`${faultText.takeBack}: ${title}`}
               onClick={() => void model.withdraw(record)}
             >
-              {FAULT_TEXT.takeBack}
+              {faultText.takeBack}
             </button>
           </li>
         ))}

@@ -1,13 +1,14 @@
 import type { FaultModel } from "../../models/fault-model.ts";
 import { MOMENTS } from "../../models/vocabulary.ts";
 import { Segments } from "../parts/Segments.tsx";
-import { FAULT_TEXT, MOMENT_TEXT } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { MOMENT_TEXT } from "../text/fault.ts";
 
 /** What may be done now depends on it: a live microphone can't be switched off. */
 export function MomentPicker({ fault }: { fault: FaultModel }) {
   return (
     <Segments
-      label={FAULT_TEXT.moment}
+      label={faultText.moment}
       options={MOMENTS}
       text={MOMENT_TEXT}
       chosen={fault.moment.value}

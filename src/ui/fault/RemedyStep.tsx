@@ -1,6 +1,7 @@
 import type { FaultModel } from "../../models/fault-model.ts";
 import { TRIAL_RESULTS } from "../../models/vocabulary.ts";
-import { FAULT_TEXT, RESULT_TEXT, secondsText } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { RESULT_TEXT, secondsText } from "../text/fault.ts";
 import { CautionList } from "./CautionList.tsx";
 
 export function RemedyStep({ model, id }: { model: FaultModel; id: string }) {
@@ -14,15 +15,15 @@ export function RemedyStep({ model, id }: { model: FaultModel; id: string }) {
         {words.remedyHow(id)} <span class="soft">({secondsText(remedy.seconds)})</span>
       </p>
       <CautionList ids={remedy.cautions} words={words} />
-      <p>{FAULT_TEXT.howDidItGo}</p>
+      <p>{faultText.howDidItGo}</p>
       <div class="answers two">
         {remedy.isWorkaround ? (
           <>
             <button type="button" onClick={() => void model.tried(id, "cured")}>
-              {FAULT_TEXT.isBack}
+              {faultText.isBack}
             </button>
             <button type="button" onClick={() => void model.tried(id, "no-change")}>
-              {FAULT_TEXT.isNotBack}
+              {faultText.isNotBack}
             </button>
           </>
         ) : (

@@ -1,7 +1,8 @@
 import type { FaultView } from "../../journal/views.ts";
 import type { FaultModel } from "../../models/fault-model.ts";
 import { CANT_TELL } from "../../models/vocabulary.ts";
-import { ENDING_TEXT, FAULT_TEXT, waitText, whyText } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { ENDING_TEXT, waitText, whyText } from "../text/fault.ts";
 import { timeOf } from "../text/format.ts";
 import { CheckStep } from "./CheckStep.tsx";
 import { RemedyStep } from "./RemedyStep.tsx";
@@ -13,13 +14,14 @@ export function StepCard(props: { model: FaultModel; fault: FaultView; timeZone:
   const advice = model.advice.value;
   const step = model.step.value;
   return (
-    <section class="card stack" aria-label={FAULT_TEXT.next}>
+    <section class="card stack" aria-label={faultText.next}>
       {step === null && advice !== null && (
         <>
-          <p>{advice.kind === "wait" ? waitText(advice.until) : FAULT_TEXT.exhausted}</p>
-          {model.moment.value === "live" && <p>{FAULT_TEXT.fallback}</p>}
+          <p>{advice.kind === "wait" ? waitText(advice.until) : faultText.exhausted}</p>
+          {model.moment.value === "live" && <p>{faultText.fallback}</p>}
         </>
       )}
+      {fault.trials.some(({ result }) => result === "cured") && <p>{faultText.audioBack}</p>}
       {step?.kind === "check" && <CheckStep model={model} id={step.id} />}
       {step?.kind === "remedy" && <RemedyStep model={model} id={step.id} />}
       {advice?.kind === "step" && step === model.steps.value[0] && (
@@ -28,24 +30,24 @@ export function StepCard(props: { model: FaultModel; fault: FaultView; timeZone:
       <div class="pair">
         {step?.kind === "check" && (
           <button type="button" onClick={() => void model.answer(step.id, CANT_TELL)}>
-            {FAULT_TEXT.cantTell}
+            {faultText.cantTell}
           </button>
         )}
         {step !== null && (
           <>
             <button type="button" onClick={() => void model.skip(step)}>
-              {FAULT_TEXT.skip}
+              {faultText.skip}
             </button>
             <a class="button" href={`#/fault/${fault.id}/steps`}>
-              {FAULT_TEXT.other}
+              {faultText.other}
             </a>
           </>
         )}
         <a class="button" href="#/fault">
-          {FAULT_TEXT.notNow}
+          {faultText.notNow}
         </a>
         <a class="button" href={`#/fault/${fault.id}/close`}>
-          {FAULT_TEXT.cured}
+          {faultText.cured}
         </a>
       </div>
     </section>
@@ -60,14 +62,14 @@ function Verdict(props: {
   const { verdict, timeZone, model } = props;
   const causes = verdict.causes.map(model.words.value.causeName).join(" + ");
   return (
-    <section class="card stack" aria-label={FAULT_TEXT.closeTitle}>
+    <section class="card stack" aria-label={faultText.closeTitle}>
       <h2 class="number">
         {timeOf(verdict.at, timeZone)} {ENDING_TEXT[verdict.ending]}
       </h2>
-      <p>{causes === "" ? FAULT_TEXT.closeCauseUnknown : causes}</p>
+      <p>{causes === "" ? faultText.closeCauseUnknown : causes}</p>
       {verdict.note !== "" && <p>{verdict.note}</p>}
       <button type="button" onClick={() => void model.withdraw(verdict.record)}>
-        {FAULT_TEXT.reopen}
+        {faultText.reopen}
       </button>
     </section>
   );

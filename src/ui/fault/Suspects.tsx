@@ -1,5 +1,6 @@
 import type { FaultModel } from "../../models/fault-model.ts";
-import { FAULT_TEXT, RESULT_TEXT, STRENGTH_TEXT } from "../text/fault.ts";
+import * as faultText from "../text/fault.ts";
+import { RESULT_TEXT, STRENGTH_TEXT } from "../text/fault.ts";
 import { decibels } from "../text/format.ts";
 
 const SHOWN = 3;
@@ -9,7 +10,7 @@ export function Suspects({ model }: { model: FaultModel }) {
   const words = model.words.value;
   return (
     <section>
-      <h2>{FAULT_TEXT.suspects}</h2>
+      <h2>{faultText.suspects}</h2>
       <div class="stack">
         {model.suspects.value.slice(0, SHOWN).map((suspect) => (
           <details key={suspect.cause} class="unfold">
@@ -38,7 +39,7 @@ export function Suspects({ model }: { model: FaultModel }) {
 function Evidence({ model, cause }: { model: FaultModel; cause: string }) {
   const words = model.words.value;
   const weights = model.weights(cause);
-  if (weights.length === 0) return <p>{FAULT_TEXT.noEvidence}</p>;
+  if (weights.length === 0) return <p>{faultText.noEvidence}</p>;
   return (
     <>
       <ul>
@@ -53,7 +54,7 @@ function Evidence({ model, cause }: { model: FaultModel; cause: string }) {
           </li>
         ))}
       </ul>
-      <p class="soft">{FAULT_TEXT.evidenceUnit}</p>
+      <p class="soft">{faultText.evidenceUnit}</p>
     </>
   );
 }

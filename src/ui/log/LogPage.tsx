@@ -4,9 +4,9 @@ import type { AppModels } from "../../models/app-models.ts";
 import type { LogModel } from "../../models/log-model.ts";
 import { DraftField } from "../parts/DraftField.tsx";
 import { dateOf, timeOf } from "../text/format.ts";
-import { LOG_TEXT } from "../text/log.ts";
+import * as logText from "../text/log.ts";
 import { reportWording } from "../text/report.ts";
-import { SHELL_TEXT } from "../text/shell.ts";
+import * as shellText from "../text/shell.ts";
 
 /** The show's timeline, latest entry first, and the way out of the phone for it. */
 export function LogPage({ models }: { models: AppModels }) {
@@ -15,13 +15,13 @@ export function LogPage({ models }: { models: AppModels }) {
   if (show === null)
     return (
       <div class="stack">
-        <p>{LOG_TEXT.purpose}</p>
+        <p>{logText.purpose}</p>
         <a class="button wide" href="#/show">
-          {LOG_TEXT.openShow}
+          {logText.openShow}
         </a>
       </div>
     );
-  const name = show.name || SHELL_TEXT.unnamedShow;
+  const name = show.name || shellText.unnamedShow;
   const wording = reportWording(models.expertise.words.value);
   return (
     <div class="stack">
@@ -33,7 +33,7 @@ export function LogPage({ models }: { models: AppModels }) {
           <span class="soft number">{dateOf(show.openedAt, show.timeZone)}</span>
         </p>
         <button type="button" onClick={() => void model.share(name, wording)}>
-          {LOG_TEXT.share}
+          {logText.share}
         </button>
       </div>
       {model.shownText.value !== null && <CopyByHand model={model} text={model.shownText.value} />}
@@ -48,15 +48,15 @@ export function LogPage({ models }: { models: AppModels }) {
           <div class="grow">
             <DraftField
               id="note"
-              label={LOG_TEXT.note}
-              placeholder={LOG_TEXT.notePlaceholder}
+              label={logText.note}
+              placeholder={logText.notePlaceholder}
               draft={model.note}
               lines="some"
-              problem={model.isNoteTooLong.value ? LOG_TEXT.noteTooLong : null}
+              problem={model.isNoteTooLong.value ? logText.noteTooLong : null}
             />
           </div>
           <button type="submit" class="tall">
-            {LOG_TEXT.addNote}
+            {logText.addNote}
           </button>
         </div>
       </form>
@@ -84,12 +84,12 @@ function Entry(props: {
         <span class="soft number">{timeOf(record.at, show.timeZone)}</span>
         <br />
         <span class={isWithdrawn ? "withdrawn" : undefined}>{line}</span>
-        {isWithdrawn && <span class="soft"> ({LOG_TEXT.withdrawn})</span>}
+        {isWithdrawn && <span class="soft"> ({logText.withdrawn})</span>}
         {record.type === "sum.kept" && !isWithdrawn && (
           <>
             {" "}
             <a href={`#/calculators/${record.body.calculator}?${record.body.query}`}>
-              {LOG_TEXT.reopenSum}
+              {logText.reopenSum}
             </a>
           </>
         )}
@@ -97,10 +97,10 @@ function Entry(props: {
       {record.type !== "show.opened" && (!isWithdrawn || withdrawals.length > 0) && (
         <button
           type="button"
-          aria-label={`${isWithdrawn ? LOG_TEXT.restore : LOG_TEXT.withdraw}: ${line}`}
+          aria-label={`${isWithdrawn ? logText.restore : logText.withdraw}: ${line}`}
           onClick={() => void (isWithdrawn ? model.restore(record.id) : model.withdraw(record.id))}
         >
-          {isWithdrawn ? LOG_TEXT.restore : LOG_TEXT.withdraw}
+          {isWithdrawn ? logText.restore : logText.withdraw}
         </button>
       )}
     </li>
@@ -110,10 +110,10 @@ function Entry(props: {
 function CopyByHand({ model, text }: { model: LogModel; text: string }) {
   return (
     <section class="card stack">
-      <label for="copy-by-hand">{LOG_TEXT.copyByHand}</label>
+      <label for="copy-by-hand">{logText.copyByHand}</label>
       <textarea id="copy-by-hand" readOnly value={text} rows={8} />
       <button type="button" onClick={model.hideText}>
-        {LOG_TEXT.close}
+        {logText.close}
       </button>
     </section>
   );

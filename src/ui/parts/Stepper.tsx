@@ -1,6 +1,6 @@
 import type { LengthUnit } from "../../calculators/field.ts";
 import type { FieldState } from "../../models/distance-model.ts";
-import { CALCULATORS_TEXT } from "../text/calculators.ts";
+import * as calculatorsText from "../text/calculators.ts";
 import { problemText, unitOf } from "../text/fields.ts";
 
 /**
@@ -26,7 +26,7 @@ export function Stepper(props: {
       <div class="stepper">
         <button
           type="button"
-          aria-label={`${CALCULATORS_TEXT.less}: ${label}`}
+          aria-label={`${calculatorsText.less}: ${label}`}
           onClick={() => props.onStep(-1)}
         >
           −
@@ -45,7 +45,7 @@ export function Stepper(props: {
         />
         <button
           type="button"
-          aria-label={`${CALCULATORS_TEXT.more}: ${label}`}
+          aria-label={`${calculatorsText.more}: ${label}`}
           onClick={() => props.onStep(1)}
         >
           +

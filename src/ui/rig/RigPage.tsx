@@ -5,7 +5,8 @@ import { DraftField } from "../parts/DraftField.tsx";
 import { Segments } from "../parts/Segments.tsx";
 import { problemText } from "../text/fields.ts";
 import { megahertz } from "../text/format.ts";
-import { KIND_TEXT, RIG_TEXT } from "../text/rig.ts";
+import * as rigText from "../text/rig.ts";
+import { KIND_TEXT, NAME_PROBLEM_TEXT } from "../text/rig.ts";
 
 /** The links of the show: who is on the air, and where. */
 export function RigPage({ models }: { models: AppModels }) {
@@ -14,7 +15,7 @@ export function RigPage({ models }: { models: AppModels }) {
   const isNameProblem = problem === "no-name" || problem === "name-too-long";
   return (
     <div class="stack">
-      {model.links.value.length === 0 && <p>{RIG_TEXT.purpose}</p>}
+      {model.links.value.length === 0 && <p>{rigText.purpose}</p>}
       <form
         class="stack"
         onSubmit={(event) => {
@@ -24,20 +25,20 @@ export function RigPage({ models }: { models: AppModels }) {
       >
         <DraftField
           id="link-name"
-          label={RIG_TEXT.name}
-          placeholder={RIG_TEXT.namePlaceholder}
+          label={rigText.name}
+          placeholder={rigText.namePlaceholder}
           draft={model.name}
-          problem={isNameProblem ? RIG_TEXT[problem] : null}
+          problem={isNameProblem ? NAME_PROBLEM_TEXT[problem] : null}
         />
         <DraftField
           id="link-frequency"
-          label={RIG_TEXT.frequency}
+          label={rigText.frequency}
           inputMode="decimal"
           draft={model.frequency}
           problem={problem === null || isNameProblem ? null : problemText(problem, CARRIER, "m")}
         />
         <Segments
-          label={RIG_TEXT.kind}
+          label={rigText.kind}
           options={LINK_KINDS}
           text={KIND_TEXT}
           isWrapped
@@ -45,12 +46,12 @@ export function RigPage({ models }: { models: AppModels }) {
           onPick={model.pickKind}
         />
         <button type="submit" class="wide">
-          {model.edited.value === null ? RIG_TEXT.add : RIG_TEXT.save}
+          {model.edited.value === null ? rigText.add : rigText.save}
         </button>
       </form>
       {model.links.value.length > 0 && (
         <section>
-          <h2>{RIG_TEXT.links}</h2>
+          <h2>{rigText.links}</h2>
           <ul class="entries">
             {model.links.value.map((link) => (
               <li key={link.id} class="row">
@@ -60,24 +61,24 @@ export function RigPage({ models }: { models: AppModels }) {
                   <span class="soft number">
                     {KIND_TEXT[link.kind]},{" "}
                     {link.frequencyMhz === null
-                      ? RIG_TEXT.noFrequency
+                      ? rigText.noFrequency
                       : megahertz(link.frequencyMhz)}
                   </span>
                 </span>
                 <span class="chips">
                   <button
                     type="button"
-                    aria-label={`${RIG_TEXT.change}: ${link.name}`}
+                    aria-label={`${rigText.change}: ${link.name}`}
                     onClick={() => model.edit(link)}
                   >
-                    {RIG_TEXT.change}
+                    {rigText.change}
                   </button>
                   <button
                     type="button"
-                    aria-label={`${RIG_TEXT.remove}: ${link.name}`}
+                    aria-label={`${rigText.remove}: ${link.name}`}
                     onClick={() => void model.remove(link)}
                   >
-                    {RIG_TEXT.remove}
+                    {rigText.remove}
                   </button>
                 </span>
               </li>

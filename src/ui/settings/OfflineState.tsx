@@ -1,11 +1,12 @@
 import type { AppModels } from "../../models/app-models.ts";
-import { SETTINGS_TEXT } from "../text/settings.ts";
+import * as settingsText from "../text/settings.ts";
+import { LOOKED_TEXT } from "../text/settings.ts";
 
 const READINESS = {
-  ready: SETTINGS_TEXT.ready,
-  preparing: SETTINGS_TEXT.preparing,
-  failed: SETTINGS_TEXT.failed,
-  unsupported: SETTINGS_TEXT.unsupported,
+  ready: settingsText.ready,
+  preparing: settingsText.preparing,
+  failed: settingsText.failed,
+  unsupported: settingsText.unsupported,
 };
 
 /** Whether the app works without network, and the one place where a new version is asked for. */
@@ -15,20 +16,20 @@ export function OfflineState({ models }: { models: AppModels }) {
   const looked = offline.looked.value;
   return (
     <section class="stack">
-      <h2>{SETTINGS_TEXT.offline}</h2>
+      <h2>{settingsText.offline}</h2>
       <p role="status">{READINESS[offline.readiness.value]}</p>
       {offline.version.value !== null && (
         <p class="soft">
-          {SETTINGS_TEXT.version} {offline.version.value}
+          {settingsText.version} {offline.version.value}
         </p>
       )}
-      {isLocked && <p>{SETTINGS_TEXT.locked}</p>}
+      {isLocked && <p>{settingsText.locked}</p>}
       {!isLocked && offline.readiness.value === "ready" && (
         <button type="button" class="wide" onClick={() => void offline.look()}>
-          {SETTINGS_TEXT.check}
+          {settingsText.check}
         </button>
       )}
-      {looked !== null && <p role="status">{SETTINGS_TEXT[looked]}</p>}
+      {looked !== null && <p role="status">{LOOKED_TEXT[looked]}</p>}
     </section>
   );
 }

@@ -3,7 +3,8 @@ import type { AppModels } from "../../models/app-models.ts";
 import { LENGTH_UNITS, THEMES } from "../../models/settings-model.ts";
 import { Segments } from "../parts/Segments.tsx";
 import { megabytes } from "../text/format.ts";
-import { SETTINGS_TEXT, THEME_TEXT, UNIT_TEXT } from "../text/settings.ts";
+import * as settingsText from "../text/settings.ts";
+import { THEME_TEXT, UNIT_TEXT } from "../text/settings.ts";
 import { setAsideText } from "../text/shell.ts";
 import { OfflineState } from "./OfflineState.tsx";
 
@@ -14,9 +15,9 @@ export function Settings({ models }: { models: AppModels }) {
   return (
     <div class="stack">
       <section class="stack">
-        <h2>{SETTINGS_TEXT.theme}</h2>
+        <h2>{settingsText.theme}</h2>
         <Segments
-          label={SETTINGS_TEXT.theme}
+          label={settingsText.theme}
           options={THEMES}
           text={THEME_TEXT}
           chosen={settings.theme.value}
@@ -24,9 +25,9 @@ export function Settings({ models }: { models: AppModels }) {
         />
       </section>
       <section class="stack">
-        <h2>{SETTINGS_TEXT.units}</h2>
+        <h2>{settingsText.units}</h2>
         <Segments
-          label={SETTINGS_TEXT.units}
+          label={settingsText.units}
           options={LENGTH_UNITS}
           text={UNIT_TEXT}
           chosen={settings.lengthUnit.value}
@@ -37,7 +38,7 @@ export function Settings({ models }: { models: AppModels }) {
       <Storage models={models} />
       {setAside.length > 0 && (
         <section class="stack">
-          <h2>{SETTINGS_TEXT.setAside}</h2>
+          <h2>{settingsText.setAside}</h2>
           <p>{setAsideText(setAside.length)}</p>
           <button
             type="button"
@@ -46,15 +47,15 @@ export function Settings({ models }: { models: AppModels }) {
               void log.shareFile("fadewright-set-aside", JSON.stringify(setAside, null, 1))
             }
           >
-            {SETTINGS_TEXT.exportSetAside}
+            {settingsText.exportSetAside}
           </button>
         </section>
       )}
       <section class="stack">
-        <h2>{SETTINGS_TEXT.about}</h2>
-        <p>{SETTINGS_TEXT.aboutText}</p>
+        <h2>{settingsText.about}</h2>
+        <p>{settingsText.aboutText}</p>
         <a class="button wide" href="#/cautions">
-          {SETTINGS_TEXT.cautions}
+          {settingsText.cautions}
         </a>
       </section>
     </div>
@@ -67,16 +68,16 @@ function Storage({ models }: { models: AppModels }) {
   if (use === null) return null;
   return (
     <section class="stack">
-      <h2>{SETTINGS_TEXT.storage}</h2>
+      <h2>{settingsText.storage}</h2>
       <p>
         {use.usedBytes === null
-          ? SETTINGS_TEXT.unknownUse
-          : `${megabytes(use.usedBytes)} ${SETTINGS_TEXT.used}.`}
+          ? settingsText.unknownUse
+          : `${megabytes(use.usedBytes)} ${settingsText.used}.`}
       </p>
-      <p>{use.isPersistent ? SETTINGS_TEXT.persistent : SETTINGS_TEXT.notPersistent}</p>
+      <p>{use.isPersistent ? settingsText.persistent : settingsText.notPersistent}</p>
       {!use.isPersistent && (
         <button type="button" class="wide" onClick={() => void settings.askToPersist()}>
-          {SETTINGS_TEXT.askPersist}
+          {settingsText.askPersist}
         </button>
       )}
     </section>

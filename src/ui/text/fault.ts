@@ -1,66 +1,59 @@
 import type { Advice } from "../../diagnosis/next-step.ts";
 import type { Ending, Moment, StagePlace, TrialResult } from "../../journal/records.ts";
 
-export const FAULT_TEXT = {
-  title: "Fault",
-  purpose:
-    "When a microphone, in-ear or beltpack drops out, tap Mark dropout. The time is stored at once; the questions come after it.",
-  openShow: "Name the show first",
-  openFaults: "Open",
-  closedFaults: "Closed",
-  noFaults: "No dropout marked in this show so far.",
-  moment: "What is going on now?",
-  marks: "Links and place",
-  next: "Next step",
-  why: "Why this",
-  suspects: "What it could be",
-  given: "Answers so far",
-  change: "Change",
-  takeBack: "Take back",
-  cantTell: "Can't tell",
-  skip: "Skip",
-  other: "Something else",
-  notNow: "Not now",
-  cured: "It's cured",
-  for: "Speaks for it",
-  against: "Speaks against it",
-  noEvidence: "Nothing answered yet moves this one.",
-  evidenceUnit: "Evidence in decibels: +10 dB makes it ten times likelier against the rest.",
-  otherTitle: "Other steps",
-  remedy: "Put it right",
-  check: "Find out",
-  reading: "Reading what the fault finder knows…",
-  unread:
-    "What the fault finder knows could not be read. Marking, the log and the calculators work. Try again.",
-  readAgain: "Try again",
-  otherNone: "Nothing else can be done at this moment of the show.",
-  exhausted:
-    "Every step has been done or skipped. Close the fault with what you know, or take an answer back.",
-  fallback: "If audio has to be back at once: hand over a cabled microphone.",
-  gone: "This fault is not in the log on this phone.",
-  toFaults: "To the faults",
-  closeTitle: "Close the fault",
-  closeEnding: "How did it end?",
-  closeCause: "What was it?",
-  closeCauseUnknown: "Not known",
-  closeRemedy: "What helped?",
-  closeRemedyNone: "Nothing in particular",
-  closeNote: "Note for the next crew (optional)",
-  closeDo: "Close the fault",
-  noteTooLong: "At most 4000 characters. Nothing is lost: shorten the note and close again.",
-  audioBack:
-    "Audio is back by a work-around. Close the fault as worked around, or keep tracing when there is a pause.",
-  marksTitle: "Which links, and where?",
-  marksNoLinks: "Add the show's links under Rig to choose them here.",
-  stage: "Place on stage, as the performer sees it",
-  done: "Done",
-  back: "Back to the fault",
-  trace: "Trace it",
-  reopen: "Open it again",
-  isBack: "Audio is back",
-  isNotBack: "Still dropping out",
-  howDidItGo: "How did it go?",
-} as const;
+export const title = "Fault";
+export const purpose =
+  "When a microphone, in-ear or beltpack drops out, tap Mark dropout. The time is stored at once; the questions come after it.";
+export const openShow = "Name the show first";
+export const openFaults = "Open";
+export const closedFaults = "Closed";
+export const noFaults = "No dropout marked in this show so far.";
+export const moment = "What is going on now?";
+export const marks = "Links and place";
+export const next = "Next step";
+export const suspects = "What it could be";
+export const given = "Answers so far";
+export const takeBack = "Take back";
+export const cantTell = "Can't tell";
+export const skip = "Skip";
+export const other = "Something else";
+export const notNow = "Not now";
+export const cured = "It's cured";
+export const noEvidence = "Nothing answered yet moves this one.";
+export const evidenceUnit =
+  "Evidence in decibels: +10 dB makes it ten times likelier against the rest.";
+export const otherTitle = "Other steps";
+export const reading = "Reading what the fault finder knows…";
+export const unread =
+  "What the fault finder knows could not be read. Marking, the log and the calculators work. Try again.";
+export const readAgain = "Try again";
+export const otherNone = "Nothing else can be done at this moment of the show.";
+export const exhausted =
+  "Every step has been done or skipped. Close the fault with what you know, or take an answer back.";
+export const fallback = "If audio has to be back at once: hand over a cabled microphone.";
+export const gone = "This fault is not in the log on this phone.";
+export const toFaults = "To the faults";
+export const closeTitle = "Close the fault";
+export const closeEnding = "How did it end?";
+export const closeCause = "What was it?";
+export const closeCauseUnknown = "Not known";
+export const closeRemedy = "What helped?";
+export const closeRemedyNone = "Nothing in particular";
+export const closeNote = "Note for the next crew (optional)";
+export const closeDo = "Close the fault";
+export const noteTooLong =
+  "At most 4000 characters. Nothing is lost: shorten the note and close again.";
+export const audioBack = "Audio is back. Close the fault, or keep tracing when there is a pause.";
+export const marksTitle = "Which links, and where?";
+export const marksNoLinks = "Add the show's links under Rig to choose them here.";
+export const stage = "Place on stage, as the performer sees it";
+export const done = "Done";
+export const back = "Back to the fault";
+export const trace = "Trace it";
+export const reopen = "Open it again";
+export const isBack = "Audio is back";
+export const isNotBack = "Still dropping out";
+export const howDidItGo = "How did it go?";
 
 export const MOMENT_TEXT: Readonly<Record<Moment, string>> = {
   live: "Live",
@@ -129,3 +122,8 @@ export function waitText(until: Moment): string {
 export function secondsText(seconds: number): string {
   return seconds < 90 ? `about ${seconds} s` : `about ${Math.round(seconds / 60)} min`;
 }
+
+export const STEP_KIND_TEXT = {
+  remedy: "Put it right",
+  check: "Find out",
+} as const;

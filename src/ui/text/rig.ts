@@ -1,22 +1,18 @@
 import type { LinkKind } from "../../journal/records.ts";
 
-export const RIG_TEXT = {
-  title: "Rig",
-  purpose:
-    "List the links of the show: each microphone, in-ear and beltpack. Then a dropout can be marked for the right one.",
-  name: "Name",
-  namePlaceholder: "Lead vocal",
-  frequency: "Carrier in MHz (optional)",
-  kind: "Kind",
-  add: "Add link",
-  save: "Save change",
-  change: "Change",
-  remove: "Remove",
-  links: "Links of the show",
-  noFrequency: "carrier not given",
-  "no-name": "Type a name, as it stands on the tape of the receiver.",
-  "name-too-long": "At most 120 characters. Nothing is lost: shorten it and add again.",
-} as const;
+export const title = "Rig";
+export const purpose =
+  "List the links of the show: each microphone, in-ear and beltpack. Then a dropout can be marked for the right one.";
+export const name = "Name";
+export const namePlaceholder = "Lead vocal";
+export const frequency = "Carrier in MHz (optional)";
+export const kind = "Kind";
+export const add = "Add link";
+export const save = "Save change";
+export const change = "Change";
+export const remove = "Remove";
+export const links = "Links of the show";
+export const noFrequency = "carrier not given";
 
 export const KIND_TEXT: Readonly<Record<LinkKind, string>> = {
   handheld: "Handheld",
@@ -24,3 +20,8 @@ export const KIND_TEXT: Readonly<Record<LinkKind, string>> = {
   "in-ear": "In-ear",
   intercom: "Intercom",
 };
+
+export const NAME_PROBLEM_TEXT = {
+  "no-name": "Type a name, as it stands on the tape of the receiver.",
+  "name-too-long": "At most 120 characters. Nothing is lost: shorten it and add again.",
+} as const;

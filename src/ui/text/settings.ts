@@ -1,37 +1,32 @@
 import type { LengthUnit } from "../../calculators/field.ts";
 import type { Theme } from "../../models/settings-model.ts";
 
-export const SETTINGS_TEXT = {
-  title: "Settings",
-  theme: "Theme",
-  units: "Lengths in",
-  offline: "Without network",
-  ready: "Ready without network: everything is stored on this phone.",
-  preparing: "Getting ready for use without network…",
-  failed:
-    "Not ready without network: the download did not finish. Open the app once more with a connection.",
-  unsupported:
-    "This address can't be made ready for use without network. It takes HTTPS and a browser that allows service workers.",
-  version: "Version",
-  check: "Look for a new version",
-  updateNow: "Restart with the new version",
-  locked: "A show is open: the version stays as it is until you close the show.",
-  found: "A new version is on its way.",
-  none: "No newer version there.",
-  unreachable: "Can't reach the place the app came from. Nothing has changed.",
-  storage: "Storage",
-  persistent: "The browser has agreed not to clear the log by itself.",
-  notPersistent: "The browser may clear the log when space is short. Share the log after the show.",
-  askPersist: "Ask the browser to keep it",
-  unknownUse: "This browser does not tell how much is used.",
-  used: "used on this phone",
-  setAside: "Set-aside records",
-  exportSetAside: "Hand over the set-aside records",
-  about: "About",
-  aboutText:
-    "Fadewright helps to find out why a wireless link drops out. It measures nothing itself, sends nothing anywhere, and gives no licence.",
-  cautions: "Cautions",
-} as const;
+export const title = "Settings";
+export const theme = "Theme";
+export const units = "Lengths in";
+export const offline = "Without network";
+export const ready = "Ready without network: everything is stored on this phone.";
+export const preparing = "Getting ready for use without network…";
+export const failed =
+  "Not ready without network: the download did not finish. Open the app once more with a connection.";
+export const unsupported =
+  "This address can't be made ready for use without network. It takes HTTPS and a browser that allows service workers.";
+export const version = "Version";
+export const check = "Look for a new version";
+export const locked = "A show is open: the version stays as it is until you close the show.";
+export const storage = "Storage";
+export const persistent = "The browser has agreed not to clear the log by itself.";
+export const notPersistent =
+  "The browser may clear the log when space is short. Share the log after the show.";
+export const askPersist = "Ask the browser to keep it";
+export const unknownUse = "This browser does not tell how much is used.";
+export const used = "used on this phone";
+export const setAside = "Set-aside records";
+export const exportSetAside = "Hand over the set-aside records";
+export const about = "About";
+export const aboutText =
+  "Fadewright helps to find out why a wireless link drops out. It measures nothing itself, sends nothing anywhere, and gives no licence.";
+export const cautions = "Cautions";
 
 export const THEME_TEXT: Readonly<Record<Theme, string>> = {
   blackout: "Blackout",
@@ -43,3 +38,11 @@ export const UNIT_TEXT: Readonly<Record<LengthUnit, string>> = { m: "Metres", ft
 
 export const CAUTIONS_INTRO =
   "Advice in this app never outranks local codes, the house's rules, or the licensed or competent person in charge.";
+
+/** What came of a look for a new version. */
+export const LOOKED_TEXT = {
+  found: "A new version is on its way.",
+  none: "No newer version there.",
+  locked: "A show is open: the version stays as it is until you close the show.",
+  unreachable: "Can't reach the place the app came from. Nothing has changed.",
+} as const;

@@ -1,0 +1,1 @@
+export function readTotals(folder: string): { passed: number; failed: number; skipped: number };

@@ -1,0 +1,48 @@
+/** Points as they were read: the first `count` places hold them. */
+export interface ReadPoints {
+  readonly frequencies: Float64Array;
+  readonly levels: Float64Array;
+  readonly count: number;
+}
+
+/**
+ * The points by rising frequency, each frequency once with the highest of its levels: a carrier that
+ * one of two overlapping sweeps has seen must stay.
+ */
+export function sortedPoints({ frequencies, levels, count }: ReadPoints): {
+  readonly frequencies: Float64Array;
+  readonly levels: Float64Array;
+  readonly duplicateCount: number;
+} {
+  const order = orderOf(frequencies.subarray(0, count));
+  const sorted = new Float64Array(count);
+  const highest = new Float64Array(count);
+  let kept = 0;
+  for (const place of order) {
+    const frequency = frequencies[place] ?? Number.NaN;
+    const level = levels[place] ?? Number.NaN;
+    const previous = kept - 1;
+    if (sorted[previous] === frequency) {
+      highest[previous] = Math.max(highest[previous] ?? level, level);
+    } else {
+      sorted[kept] = frequency;
+      highest[kept] = level;
+      kept += 1;
+    }
+  }
+  return {
+    frequencies: sorted.slice(0, kept),
+    levels: highest.slice(0, kept),
+    duplicateCount: count - kept,
+  };
+}
+
+/** The places in the order of their values; most scans rise already, which takes no sorting. */
+function orderOf(values: Float64Array): Uint32Array {
+  const order = Uint32Array.from(values, (_, place) => place);
+  const at = (place: number) => values[place] ?? Number.NaN;
+  let isRising = true;
+  for (let place = 1; place < values.length && isRising; place += 1)
+    isRising = at(place - 1) <= at(place);
+  return isRising ? order : order.sort((one, two) => at(one) - at(two));
+}
