@@ -53,9 +53,6 @@ export default defineConfig({
     // A fiftieth smaller than the built-in minifier's output.
     minify: "terser",
     terserOptions: { ecma: 2020, module: true, compress: { passes: 3 } },
-    rolldownOptions: {
-      treeshake: { unknownGlobalSideEffects: false, propertyReadSideEffects: false },
-    },
   },
   plugins: [
     contentSecurityPolicy,

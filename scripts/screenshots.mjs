@@ -58,13 +58,13 @@ try {
   for (const { name, frequencyMhz } of LINKS) {
     await page.fill("#link-name", name);
     await page.fill("#link-frequency", frequencyMhz);
-    await page.click('main [data-option="bodypack"]');
+    await page.getByRole("radio", { name: "Bodypack" }).check();
     await page.click('main button[type="submit"]');
     await page.getByText(name, { exact: true }).waitFor();
   }
 
   await open(page, "#/fault");
-  await page.click('main [data-option="between"]');
+  await page.getByRole("radio", { name: "Between" }).check();
   await later(page, 420);
   await page.click(".dock button.main");
   await page.waitForURL(/#\/fault\/./);

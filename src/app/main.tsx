@@ -68,10 +68,7 @@ void surroundings.loadKept().then(() => {
 });
 
 // An acknowledgement belongs to the screen on which it was given.
-effect(() => {
-  navigation.place.value;
-  notices.clear();
-});
+navigation.place.subscribe(() => notices.clear());
 // The shortcut of the installed icon opens the place "mark": that tap is the mark.
 effect(() => {
   if (navigation.route.value.place === "mark") untracked(() => void fault.markDropout());

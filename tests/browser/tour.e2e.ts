@@ -124,6 +124,13 @@ test("the shortcut of the installed icon marks at once, and only once", async ({
   await expect(page.getByText(/^1 dropout: /)).toBeVisible();
 });
 
+test("an acknowledgement goes with the screen on which it was given", async ({ page, site }) => {
+  await page.goto(site.url);
+  await mark(page);
+  await goTo(page, "Rig");
+  await expect(page.locator(".dock").getByRole("status")).toBeEmpty();
+});
+
 test("two windows show each other's entries", async ({ page, site, context }) => {
   await page.goto(site.url);
   await openShow(page);
