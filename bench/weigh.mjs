@@ -5,13 +5,12 @@ import { build } from "vite";
 const USES = {
   preact: `export { render } from "preact";
     export { useEffect, useRef } from "preact/hooks";
-    export { Fragment, jsx, jsxs } from "preact/jsx-runtime";`,
+    export { Fragment, h } from "preact";`,
   "@preact/signals": `export { batch, computed, effect, signal, untracked } from "@preact/signals";`,
   idb: `export { openDB } from "idb";`,
   "zod/mini": `import * as z from "zod/mini";
-    export const uses = [z.array, z.enum, z.int, z.maximum, z.maxLength, z.minimum, z.minLength,
-      z.nonnegative, z.nullable, z.number, z.object, z.positive, z.string, z.unknown];`,
-  "workbox-window": `export { Workbox } from "workbox-window";`,
+    export const uses = [z.custom, z.object];`,
+  "workbox-window": `export { messageSW, Workbox } from "workbox-window";`,
   uuid: `export { v7 } from "uuid";`,
 };
 

@@ -13,6 +13,7 @@ const BUILT_FROM = [
   "index.html",
   "vite.config.ts",
   "manifest.config.ts",
+  "expertise.plugin.ts",
   "package-lock.json",
 ];
 /** The build writes the service worker last. */

@@ -11,9 +11,12 @@ const FIELDS = [
   "source",
 ];
 const SOURCE_FIELDS = ["body", "document", "edition", "where", "readAt", "readOn", "standing"];
-const UNITS = ["M", "Km", "Mhz", "Hz", "Db", "Dbm", "Dbi", "Mw", "W", "K", "Deg", "Ms", "Seconds"];
-/** Numbers that have no unit. */
-const PLAIN_NUMBERS = ["exponent"];
+/**
+ * A number's name ends in its unit, or in the word for a number that has none: a share of 1, a
+ * count, a ratio.
+ */
+const NAMED_WITH_UNIT =
+  /^(exponent|order|count|level|ratio|share)$|(M|Mm|Km|Mhz|Khz|Hz|Db|Dbm|Dbi|Dbd|Dbc|Mw|W|K|Deg|S|Ms|Seconds|MPerS|VPerM|Ohm|Percent|Probability|Count|Ratio|Order|Exponent|Factor|Level)$/;
 
 export interface RowFile {
   readonly path: string;
@@ -47,7 +50,7 @@ function offencesOf(row: unknown): string[] {
       (name) => `lacks source.${name}`,
     ),
     ...numbersOf(fieldOf(row, "input"))
-      .filter((name) => !PLAIN_NUMBERS.includes(name) && !hasUnit(name))
+      .filter((name) => !NAMED_WITH_UNIT.test(name))
       .map((name) => `names no unit in input.${name}`),
     ...(/^\d{4}-\d\d-\d\d$/.test(String(fieldOf(source, "readOn")))
       ? []
@@ -59,9 +62,6 @@ function offencesOf(row: unknown): string[] {
 
 const numbersOf = (input: unknown): string[] =>
   Object.entries(input ?? {}).flatMap(([name, value]) => (typeof value === "number" ? [name] : []));
-
-const hasUnit = (name: string): boolean =>
-  UNITS.some((unit) => name.endsWith(unit) || name === unit.toLowerCase());
 
 const fieldOf = (value: unknown, name: string): unknown =>
   typeof value === "object" && value !== null ? Reflect.get(value, name) : undefined;

@@ -27,7 +27,7 @@ export function StepCard(props: { model: FaultModel; fault: FaultView; timeZone:
       {advice?.kind === "step" && step === model.steps.value[0] && (
         <p class="soft">{whyText(advice.reason, model.words.value.causeName)}</p>
       )}
-      <div class="pair">
+      <div class="ways">
         {step?.kind === "check" && (
           <button type="button" onClick={() => void model.answer(step.id, CANT_TELL)}>
             {faultText.cantTell}

@@ -3,7 +3,7 @@ import type { LengthUnit } from "../../calculators/field.ts";
 import type { PresetId } from "../../models/distance-model.ts";
 import { decibels, lengthIn, threeFigures } from "./format.ts";
 
-export const title = "Distance and level";
+export const title = "Distance";
 export const surroundings = "Surroundings";
 export const ownExponent = "Own exponent";
 export const blank = "No answer while a field is empty or out of its range.";
