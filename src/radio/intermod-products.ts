@@ -96,29 +96,30 @@ export function intermodHitCounts(search: IntermodSearch): number[] {
   const targets = targetsOf("intermodHitCounts", search);
   const counts = search.victimsMhz.map(() => 0);
   for (const kind of search.kinds)
-    for (const { first, second, victim, low, high } of windowsOf(kind, carriers, targets)) {
+    for (const { head, target, low, high } of windowsOf(kind, carriers, targets)) {
       const isInside = (place: number) => place >= low && place < high;
-      const own = Number(isInside(first)) + Number(second !== null && isInside(second));
-      counts[victim] = (counts[victim] ?? 0) + high - low - own;
+      const own = Number(isInside(head.first)) + Number(isInside(head.second));
+      counts[target.victim] = (counts[target.victim] ?? 0) + high - low - own;
     }
   return counts;
 }
 
-/** A carrier in whole hertz, so that sums and differences of many are exact. */
-interface Carrier {
-  readonly hz: number;
-  readonly place: number;
+/** Carriers in whole hertz, so that sums and differences of many are exact, lowest first. */
+interface Carriers {
+  readonly hz: readonly number[];
+  /** Where each stood in the list that was handed in. */
+  readonly places: readonly number[];
 }
 
-/** The carriers of a product but the last, by their places in the rising list. */
+/** The carriers of a product but the last, as indexes of the rising list; second is −1 where there is none. */
 interface Head {
   readonly first: number;
-  readonly second: number | null;
+  readonly second: number;
   /** What they contribute to the frequency. [Hz] */
   readonly sumHz: number;
   /** The last carrier counts so often, as a difference. */
   readonly lastFactor: number;
-  /** Below this place the last carrier would make a product over again. */
+  /** Below this index the last carrier would make a product over again. */
   readonly from: number;
 }
 
@@ -131,20 +132,21 @@ interface Target {
 }
 
 /** Last carriers, from low up to but without high, that bring a head near a victim. */
-interface Window extends Head, Target {
+interface Window {
+  readonly head: Head;
+  readonly target: Target;
   readonly low: number;
   readonly high: number;
 }
 
 const toHz = (frequencyMhz: number): number => Math.round(frequencyMhz * 1e6);
 
-function rising(caller: string, carriersMhz: readonly number[]): readonly Carrier[] {
-  return carriersMhz
-    .map((carrierMhz, place) => {
-      requireRange(caller, FREQUENCY_LIMITS_MHZ, { carrierMhz });
-      return { hz: toHz(carrierMhz), place };
-    })
+function rising(caller: string, carriersMhz: readonly number[]): Carriers {
+  for (const carrierMhz of carriersMhz) requireRange(caller, FREQUENCY_LIMITS_MHZ, { carrierMhz });
+  const sorted = carriersMhz
+    .map((carrierMhz, place) => ({ hz: toHz(carrierMhz), place }))
     .sort((a, b) => a.hz - b.hz);
+  return { hz: sorted.map(({ hz }) => hz), places: sorted.map(({ place }) => place) };
 }
 
 /** Highest first. Sums below zero land on their mirror image, so each victim has a target there too. */
@@ -164,83 +166,78 @@ function targetsOf(caller: string, search: IntermodSearch): readonly Target[] {
     .sort((a, b) => b.highHz - a.highHz);
 }
 
-function* headsOf(kind: IntermodKind, carriers: readonly Carrier[]): Generator<Head> {
-  const { factors } = INTERMOD_RECIPES[kind];
-  const [a = 0, b = 0, c] = factors;
+function* headsOf(kind: IntermodKind, { hz }: Carriers): Generator<Head> {
+  const [a = 0, b = 0, c] = INTERMOD_RECIPES[kind].factors;
   const lastFactor = -(c ?? b);
-  for (const [first, { hz: firstHz }] of carriers.entries()) {
-    if (c === undefined) {
-      yield { first, second: null, sumHz: a * firstHz, lastFactor, from: 0 };
-      continue;
-    }
-    for (const [second, { hz: secondHz }] of carriers.entries()) {
-      // Letters that count alike may swap their carriers without making another product.
-      if (second === first || (a === b && second < first)) continue;
-      const from = b === c ? second + 1 : 0;
-      yield { first, second, sumHz: a * firstHz + b * secondHz, lastFactor, from };
-    }
+  for (let first = 0; first < hz.length; first += 1) {
+    const firstHz = a * (hz[first] ?? 0);
+    if (c === undefined) yield { first, second: -1, sumHz: firstHz, lastFactor, from: 0 };
+    // Letters that count alike may swap their carriers without making another product.
+    else
+      for (let second = a === b ? first + 1 : 0; second < hz.length; second += 1) {
+        if (second === first) continue;
+        const sumHz = firstHz + b * (hz[second] ?? 0);
+        yield { first, second, sumHz, lastFactor, from: b === c ? second + 1 : 0 };
+      }
   }
 }
 
 function* windowsOf(
   kind: IntermodKind,
-  carriers: readonly Carrier[],
+  carriers: Carriers,
   targets: readonly Target[],
 ): Generator<Window> {
   for (const head of headsOf(kind, carriers)) {
     const { sumHz, lastFactor } = head;
-    const lastHz = (place: number) =>
-      lastFactor * (carriers[place]?.hz ?? Number.POSITIVE_INFINITY);
+    const lastHz = (index: number) => lastFactor * (carriers.hz[index] ?? Number.POSITIVE_INFINITY);
     let low = head.from;
     for (const target of targets) {
       // The lower the target, the higher the last carrier: neither edge ever moves back.
       while (lastHz(low) < sumHz - target.highHz) low += 1;
-      if (low === carriers.length) break;
+      if (low === carriers.hz.length) break;
       let high = low;
-      while (high < carriers.length && lastHz(high) <= sumHz - target.lowHz) high += 1;
-      if (high > low) yield { ...head, ...target, low, high };
+      while (lastHz(high) <= sumHz - target.lowHz) high += 1;
+      if (high > low) yield { head, target, low, high };
     }
   }
 }
 
 function* eachHit(
-  carriers: readonly Carrier[],
+  carriers: Carriers,
   targets: readonly Target[],
   kinds: readonly IntermodKind[],
 ): Generator<IntermodHit, void, undefined> {
   for (const kind of kinds)
-    for (const window of windowsOf(kind, carriers, targets))
-      for (let last = window.low; last < window.high; last += 1) {
-        const product = productOf(kind, window, last, carriers);
-        if (product === null) continue;
-        const offsetMhz = (toHz(product.frequencyMhz) - window.victimHz) / 1e6;
-        yield { ...product, victim: window.victim, offsetMhz };
+    for (const { head, target, low, high } of windowsOf(kind, carriers, targets))
+      for (let last = low; last < high; last += 1) {
+        if (last === head.first || last === head.second) continue;
+        const { frequencyMhz, carriers: places } = productOf(kind, head, last, carriers);
+        const offsetMhz = (toHz(frequencyMhz) - target.victimHz) / 1e6;
+        yield { kind, frequencyMhz, carriers: places, victim: target.victim, offsetMhz };
       }
 }
 
 function* eachProduct(
-  carriers: readonly Carrier[],
+  carriers: Carriers,
   kinds: readonly IntermodKind[],
 ): Generator<IntermodProduct, void, undefined> {
   for (const kind of kinds)
     for (const head of headsOf(kind, carriers))
-      for (let last = head.from; last < carriers.length; last += 1) {
-        const product = productOf(kind, head, last, carriers);
-        if (product !== null) yield product;
-      }
+      for (let last = head.from; last < carriers.hz.length; last += 1)
+        if (last !== head.first && last !== head.second)
+          yield productOf(kind, head, last, carriers);
 }
 
-/** Null where the last carrier is one of the others already. */
 function productOf(
   kind: IntermodKind,
-  head: Head,
+  { first, second, sumHz, lastFactor }: Head,
   last: number,
-  carriers: readonly Carrier[],
-): IntermodProduct | null {
-  const { first, second } = head;
-  if (last === first || last === second) return null;
-  const members = [first, second, last].flatMap((place) => carriers[place ?? -1] ?? []);
-  const signedHz = head.sumHz - head.lastFactor * (carriers[last]?.hz ?? 0);
-  const frequencyMhz = Math.abs(signedHz) / 1e6;
-  return { kind, frequencyMhz, carriers: members.map(({ place }) => place) };
+  { hz, places }: Carriers,
+): IntermodProduct {
+  const members = second < 0 ? [first, last] : [first, second, last];
+  return {
+    kind,
+    frequencyMhz: Math.abs(sumHz - lastFactor * (hz[last] ?? 0)) / 1e6,
+    carriers: members.map((index) => places[index] ?? -1),
+  };
 }

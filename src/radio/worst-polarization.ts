@@ -1,5 +1,10 @@
 import type { Limits } from "./limits.ts";
-import { type Polarization, polarizationEfficiencyRatio } from "./polarization-efficiency.ts";
+import {
+  AXIS_RATIO_LIMITS,
+  type Polarization,
+  polarizationEfficiencyRatio,
+  TILT_LIMITS_DEG,
+} from "./polarization-efficiency.ts";
 import { type CrossPolarLimits, polarizationLossDb } from "./polarization-loss.ts";
 import { requireRange } from "./require-range.ts";
 import { requireWhole } from "./require-whole.ts";
@@ -35,6 +40,11 @@ export interface AnyTilt {
 export function worstWaveTiltDeg(turn: AnyTilt): number {
   const { waveAxisRatio, antennas } = turn;
   requireWhole("worstWaveTiltDeg", ANTENNA_COUNT_LIMITS, { antennaCount: antennas.length });
+  requireRange("worstWaveTiltDeg", AXIS_RATIO_LIMITS, { waveAxisRatio });
+  for (const { tiltDeg, axisRatio } of antennas) {
+    requireRange("worstWaveTiltDeg", TILT_LIMITS_DEG, { tiltDeg });
+    requireRange("worstWaveTiltDeg", AXIS_RATIO_LIMITS, { axisRatio });
+  }
   const taken = (tiltDeg: number) =>
     Math.max(
       ...antennas.map((antenna) =>
@@ -103,7 +113,6 @@ function equalAt(one: Swing, two: Swing): number[] {
  */
 export function worstPolarizationLossDb(turn: AnyTilt & CrossPolarLimits): number {
   const { waveAxisRatio, antennas, isolationDb, crossRatioDb } = turn;
-  requireRange("worstPolarizationLossDb", { min: -1, max: 1 }, { waveAxisRatio });
   const wave = { tiltDeg: worstWaveTiltDeg(turn), axisRatio: waveAxisRatio };
   return Math.min(
     ...antennas.map((antenna) => polarizationLossDb({ wave, antenna, isolationDb, crossRatioDb })),

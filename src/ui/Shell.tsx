@@ -24,6 +24,7 @@ import * as faultText from "./text/fault.ts";
 import * as logText from "./text/log.ts";
 import * as rigText from "./text/rig.ts";
 import * as settingsText from "./text/settings.ts";
+import * as shellText from "./text/shell.ts";
 import * as showText from "./text/show.ts";
 
 type Part = ComponentType<{ models: AppModels }>;
@@ -50,6 +51,14 @@ const SCREENS: Readonly<Record<Route["place"], Screen>> = {
   cautions: { title: settingsText.cautions, Content: Cautions },
 };
 
+/** These answer at once; the others wait for the log rather than show an empty one first. */
+const WITHOUT_LOG: ReadonlySet<Route["place"]> = new Set([
+  "calculators",
+  "distance",
+  "settings",
+  "cautions",
+]);
+
 /** The frame of every screen: top line, the screen itself, and the dock at the thumb. */
 export function Shell({ models }: { models: AppModels }) {
   const route = models.navigation.route.value;
@@ -67,7 +76,11 @@ export function Shell({ models }: { models: AppModels }) {
       <TopBar models={models} title={title} />
       <main ref={main} class="page" tabIndex={-1}>
         <StateLines models={models} />
-        <Content models={models} />
+        {models.journal.phase.value === "loading" && !WITHOUT_LOG.has(route.place) ? (
+          <p class="soft">{shellText.reading}</p>
+        ) : (
+          <Content models={models} />
+        )}
       </main>
       <Dock models={models} tab={tabOf(route)}>
         {Action && <Action models={models} />}

@@ -13,7 +13,6 @@ export function StateLines({ models }: { models: AppModels }) {
   return (
     <>
       <MishapLine models={models} />
-      {journal.phase.value === "loading" && <p class="soft">{shellText.reading}</p>}
       {journal.isReplaced.value && <Line text={shellText.replaced} isWarning />}
       {failure !== null && (
         <div class="line-note warning" role="alert">

@@ -30,7 +30,11 @@ function quotedCellsOf(line: string, delimiter: Delimiter): string[] {
 
 /** The number in a cell; NaN where it holds none, words for numbers such as "NaN" and "inf" included. */
 export function numberIn(cell: string, decimal: DecimalMark): number {
-  const text = cell.trim().replace("\u2212", "-");
-  if (!NUMBER_WITH[decimal].test(text)) return Number.NaN;
+  const pattern = NUMBER_WITH[decimal];
+  let text = cell;
+  if (!pattern.test(text)) {
+    text = text.trim().replace("\u2212", "-");
+    if (!pattern.test(text)) return Number.NaN;
+  }
   return Number(decimal === "," ? text.replace(",", ".") : text);
 }

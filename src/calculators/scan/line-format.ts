@@ -30,7 +30,7 @@ export const COMMENT = /^\s*(?:#|\/\/|%|!)/;
 const FREQUENCY_NAMES = [/freq/i, /(?<![a-z])[kmg]?hz(?![a-z])/i];
 const LEVEL_NAMES = [/level|power|ampl|magn|signal|rssi/i, /db/i];
 
-/** Two columns of whole numbers, or one with decimal commas. */
+/** Two columns of whole numbers, or one with decimal commas: only names above them can tell. */
 const WHOLE_BY_COMMA = /^\s*\d+,\d+\s*$/;
 
 /** One way to read the sample. */
@@ -67,10 +67,8 @@ export function formatOf(sample: readonly string[]): LineFormat | ScanProblemCod
     const isByComma = delimiter === "," && texts.every((text) => !text.includes("."));
     return isByComma ? "ambiguous-commas" : "which-columns";
   }
-  // A scan rises; a "frequency" that comes again and again is the whole part of one that does.
-  const isSplit = delimiter === "," && texts.every((text) => WHOLE_BY_COMMA.test(text));
-  if (isSplit && new Set(texts.map((text) => text.split(",")[0])).size < texts.length)
-    return "ambiguous-commas";
+  const isWhole = delimiter === "," && texts.every((text) => WHOLE_BY_COMMA.test(text));
+  if (isWhole && cellsOf(preamble[0] ?? "", delimiter).length < 2) return "ambiguous-commas";
   return { delimiter, decimal, ...columns, preamble, firstRow: sample[first] ?? "" };
 }
 

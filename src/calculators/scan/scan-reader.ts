@@ -7,7 +7,7 @@ import {
   type ScanReading,
   type SkippedLines,
 } from "./scan.ts";
-import { sortedPoints } from "./sorted-points.ts";
+import { type ReadPoints, sortedPoints } from "./sorted-points.ts";
 import { frequencyUnitOf, levelUnitOf, PER_MHZ } from "./units.ts";
 
 /** Reads a scan piece by piece, so that a worker can tell how far it is and stop in between. */
@@ -67,14 +67,14 @@ export function scanReader(byteCount: number): ScanReader {
     for (const { text, line: at } of sample) takeRow(text, at, settled);
   }
 
-  function takeRow(text: string, at: number, { decimal, ...columns }: LineFormat): void {
+  function takeRow(text: string, at: number, known: LineFormat): void {
     if (COMMENT.test(text)) {
       skipped.comment += 1;
       return;
     }
-    const cells = cellsOf(text, columns.delimiter);
-    const frequency = numberIn(cells[columns.frequencyColumn] ?? "", decimal);
-    const level = numberIn(cells[columns.levelColumn] ?? "", decimal);
+    const cells = cellsOf(text, known.delimiter);
+    const frequency = numberIn(cells[known.frequencyColumn] ?? "", known.decimal);
+    const level = numberIn(cells[known.levelColumn] ?? "", known.decimal);
     if (Number.isNaN(frequency) || Number.isNaN(level)) {
       skipped[count === 0 ? "preamble" : "unreadable"] += 1;
     } else if (!(frequency > 0 && frequency <= FREQUENCY_LIMIT && Math.abs(level) <= LEVEL_LIMIT)) {
@@ -92,9 +92,11 @@ export function scanReader(byteCount: number): ScanReader {
     }
   }
 
-  function takeLine(text: string): void {
+  function takeLine(text: string, isSuspect: boolean): void {
     line += 1;
-    if (NOT_TEXT.test(text.slice(0, SCAN_LIMITS.lineLength + 1))) fail("not-text", line);
+    // Only as far as a line that goes on would be looked at, however the text is cut into pieces.
+    if (isSuspect && NOT_TEXT.test(text.slice(0, SCAN_LIMITS.lineLength + 1)))
+      fail("not-text", line);
     else if (text.length > SCAN_LIMITS.lineLength) fail("line-too-long", line);
     else if (text.trim() === "") skipped.blank += 1;
     else if (format !== null) takeRow(text, line, format);
@@ -106,13 +108,14 @@ export function scanReader(byteCount: number): ScanReader {
 
   /** Takes all lines that have ended; one that may go on waits, but not for ever. */
   function takeText(text: string): void {
+    const isSuspect = NOT_TEXT.test(text);
     const lines = text.split("\n");
     pending = lines.pop() ?? "";
     for (const one of lines) {
       if (problem !== null) return;
-      takeLine(one);
+      takeLine(one, isSuspect);
     }
-    if (problem === null && pending.length > SCAN_LIMITS.lineLength) takeLine(pending);
+    if (problem === null && pending.length > SCAN_LIMITS.lineLength) takeLine(pending, isSuspect);
   }
 
   return {
@@ -129,7 +132,7 @@ export function scanReader(byteCount: number): ScanReader {
       return problem === null;
     },
     end() {
-      if (problem === null && pending !== "") takeLine(pending.replace("\r", ""));
+      if (problem === null && pending !== "") takeLine(pending.replace("\r", ""), true);
       if (problem === null && format === null) settleFormat();
       if (problem !== null || format === null) {
         return problem ?? { kind: "problem", code: "empty", line: null };
@@ -147,7 +150,7 @@ function grown(values: Float64Array): Float64Array<ArrayBuffer> {
 
 function readingOf(
   format: LineFormat,
-  read: Parameters<typeof sortedPoints>[0],
+  read: ReadPoints,
   skipped: SkippedLines,
 ): ScanReading {
   const { frequencies, levels, duplicateCount } = sortedPoints(read);

@@ -37,12 +37,15 @@ export function sortedPoints({ frequencies, levels, count }: ReadPoints): {
   };
 }
 
-/** The places in the order of their values; most scans rise already, which takes no sorting. */
+/** The places in the order of their values; most scans rise or fall, which takes no sorting. */
 function orderOf(values: Float64Array): Uint32Array {
   const order = Uint32Array.from(values, (_, place) => place);
   const at = (place: number) => values[place] ?? Number.NaN;
-  let isRising = true;
-  for (let place = 1; place < values.length && isRising; place += 1)
-    isRising = at(place - 1) <= at(place);
-  return isRising ? order : order.sort((one, two) => at(one) - at(two));
+  const isMonotone = (sign: number) => {
+    for (let place = 1; place < values.length; place += 1)
+      if (sign * at(place - 1) > sign * at(place)) return false;
+    return true;
+  };
+  if (isMonotone(1)) return order;
+  return isMonotone(-1) ? order.reverse() : order.sort((one, two) => at(one) - at(two));
 }

@@ -10,9 +10,9 @@ import { Suspects } from "./Suspects.tsx";
 
 /** One fault: the next step, what it could be, and what has been answered. */
 export function FaultTrace({ models }: { models: AppModels }) {
-  const { fault: model, journal, expertise } = models;
+  const { fault: model, expertise } = models;
   const traced = model.traced.value;
-  if (traced === null) return journal.phase.value === "loading" ? null : <FaultGone />;
+  if (traced === null) return <FaultGone />;
   const { fault, show } = traced;
   return (
     <div class="stack">
