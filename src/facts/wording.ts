@@ -7,13 +7,13 @@ export interface Wording {
   readonly cautions: Readonly<Record<string, CautionWording>>;
 }
 
-export interface CauseWording {
+interface CauseWording {
   readonly name: string;
   /** What is wrong, in one line for somebody who knows no radio. */
   readonly plain: string;
 }
 
-export interface CheckWording {
+interface CheckWording {
   /** Under twelve words. */
   readonly question: string;
   /** How to find out, in one or two sentences. */
@@ -22,7 +22,7 @@ export interface CheckWording {
   readonly outcomes: Readonly<Record<string, string>>;
 }
 
-export interface RemedyWording {
+interface RemedyWording {
   /** What to do, as an order. */
   readonly title: string;
   /** How, in one or two sentences. */

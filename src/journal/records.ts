@@ -59,8 +59,6 @@ export const PLACES = [
 export const LINK_KINDS = ["handheld", "bodypack", "in-ear", "intercom"] as const;
 export const TRIAL_RESULTS = ["cured", "better", "no-change", "worse"] as const;
 export const ENDINGS = ["cured", "worked-around", "stopped-by-itself", "unsolved"] as const;
-/** The answer that every check takes. */
-export const CANT_TELL = "cant-tell";
 
 const BODIES = {
   "show.opened": z.object({ name: NAME, place: NAME, timeZone: field(isText(64)) }),

@@ -10,7 +10,7 @@ export interface Known {
 }
 
 /** The sentence of each entry, without its time. Ids in the body may be unknown to the wording. */
-export type EntrySentences = {
+type EntrySentences = {
   readonly [T in RecordType]: (body: Entry<T>["body"], known: Known) => string;
 };
 

@@ -19,7 +19,7 @@ import type { Surroundings } from "./surroundings.ts";
 import type { Words } from "./words.ts";
 
 /** A suspect as the screen shows it: never more precise than it is known. */
-export interface SuspectView {
+interface SuspectView {
   readonly cause: string;
   readonly probability: number;
   readonly strength: Strength;

@@ -2,5 +2,5 @@
 
 export { EXPONENT_PRESETS } from "../calculators/distance/fields.ts";
 export { METRES_PER } from "../calculators/units.ts";
-export { CANT_TELL, NONE_OF_THESE } from "../diagnosis/knowledge.ts";
+export { CANT_TELL } from "../diagnosis/knowledge.ts";
 export { ENDINGS, LINK_KINDS, MOMENTS, PLACES, TRIAL_RESULTS } from "../journal/records.ts";

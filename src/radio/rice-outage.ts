@@ -5,7 +5,7 @@ import { requireRange } from "./require-range.ts";
 import { solveRising } from "./solve-rising.ts";
 
 /** From hardly a direct wave to hardly anything else. */
-export const K_FACTOR_LIMITS_DB: Limits = { min: -40, max: 25 };
+const K_FACTOR_LIMITS_DB: Limits = { min: -40, max: 25 };
 
 /**
  * Share of places in which the level falls below what the receiver needs, where one wave, mostly the

@@ -17,7 +17,7 @@ import { requireRange } from "./require-range.ts";
  * @source              Rec. ITU-R V.574-5 (2015), use of the decibel, symbol dBµV; from memory, to be
  *                      verified. 107.0 dB between dBm and dBµV in 50 Ω is common practice.
  * @differs             none
- * @checkedBy           none published, see test
+ * @checkedBy           zero-dbm-50-ohm, zero-dbm-75-ohm
  */
 export function voltageDbuv(powerDbm: number, impedanceOhm: number): number {
   requireRange("voltageDbuv", LEVEL_LIMITS_DBM, { powerDbm });

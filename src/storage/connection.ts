@@ -3,14 +3,14 @@ import type { ShowLock, StoreFailure } from "../journal/store.ts";
 import { givenUp, reasonOf } from "./failure.ts";
 import { DATABASE_NAME, DATABASE_VERSION, KEPT, LOCK, RECORDS, SET_ASIDE } from "./names.ts";
 
-export interface JournalDatabase extends DBSchema {
+interface JournalDatabase extends DBSchema {
   [RECORDS]: { key: string; value: unknown };
   [SET_ASIDE]: { key: number; value: unknown };
   [LOCK]: { key: string; value: ShowLock };
   [KEPT]: { key: string; value: string };
 }
 type Store = typeof RECORDS | typeof SET_ASIDE | typeof LOCK | typeof KEPT;
-export type Transaction<S extends Store> = IDBPTransaction<JournalDatabase, S[], "readwrite">;
+type Transaction<S extends Store> = IDBPTransaction<JournalDatabase, S[], "readwrite">;
 
 export interface ConnectionOptions {
   /** How long to wait for the database to open. [ms], > 0 */
@@ -32,7 +32,7 @@ export interface Connection {
     work: (transaction: Transaction<S>) => Promise<T>,
   ): Promise<Done<T>>;
 }
-export type Done<T> =
+type Done<T> =
   | { readonly kind: "ok"; readonly value: T }
   | { readonly kind: "failed"; readonly reason: StoreFailure };
 

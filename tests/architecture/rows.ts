@@ -16,7 +16,7 @@ const SOURCE_FIELDS = ["body", "document", "edition", "where", "readAt", "readOn
  * count, a ratio.
  */
 const NAMED_WITH_UNIT =
-  /^(exponent|order|count|level|ratio|share)$|(M|Mm|Km|Mhz|Khz|Hz|Db|Dbm|Dbi|Dbd|Dbc|Mw|W|K|Deg|S|Ms|Seconds|MPerS|VPerM|Ohm|Percent|Probability|Count|Ratio|Order|Exponent|Factor|Level)$/;
+  /^(exponent|order|count|level|ratio|share)$|(M|Mm|Km|Mhz|Khz|Hz|Db|Dbm|Dbuv|Dbi|Dbd|Dbc|Mw|W|K|Deg|S|Ms|Seconds|MPerS|VPerM|PerM2|Ohm|Percent|Probability|Count|Ratio|Order|Exponent|Factor|Level)$/;
 
 export interface RowFile {
   readonly path: string;

@@ -33,7 +33,7 @@ export async function mark(page: Page, count = 1): Promise<void> {
 /** The step card's own question or remedy. */
 export const stepTitle = (page: Page) =>
   page.getByRole("region", { name: "Next step" }).locator("h2");
-export const answers = (page: Page) =>
+const answers = (page: Page) =>
   page.getByRole("region", { name: "Next step" }).locator(".answers button");
 
 /** Taps the first answer of the step on the screen and returns what was asked and answered. */

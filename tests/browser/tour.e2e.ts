@@ -1,5 +1,5 @@
 import { expect, offlineReady, test } from "./fixtures.ts";
-import { answerFirst, goTo, mark, openShow, SHOW, stepTitle, tour } from "./steps.ts";
+import { answerFirst, dock, goTo, mark, openShow, SHOW, stepTitle, tour } from "./steps.ts";
 
 test("a fault goes from the first tap to the log, and nothing is asked of any other host", async ({
   page,
@@ -29,7 +29,7 @@ test("the show is shared as text that a stranger can read", async ({ page, site,
   await page.goto(site.url);
   await tour(page);
   await page.getByRole("button", { name: "Share as text" }).click();
-  await expect(page.locator(".dock").getByRole("status")).toContainText("Copied");
+  await expect(dock(page).getByRole("status")).toContainText("Copied");
   const text = await page.evaluate(() => navigator.clipboard.readText());
   expect(text).toContain(`${SHOW.name}, ${SHOW.place}`);
   expect(text).toMatch(/Lead vocal: handheld, 606\.125\sMHz\./);
@@ -119,7 +119,7 @@ test("a half typed note and a sum's inputs are there again after a kill", async 
 
 test("the shortcut of the installed icon marks at once, and only once", async ({ page, site }) => {
   await page.goto(`${site.url}/#/mark`);
-  await expect(page.locator(".dock").getByRole("status")).toContainText("Stored: dropout 1 at ");
+  await expect(dock(page).getByRole("status")).toContainText("Stored: dropout 1 at ");
   await page.reload();
   await expect(page.getByText(/^1 dropout: /)).toBeVisible();
 });
@@ -128,7 +128,7 @@ test("an acknowledgement goes with the screen on which it was given", async ({ p
   await page.goto(site.url);
   await mark(page);
   await goTo(page, "Rig");
-  await expect(page.locator(".dock").getByRole("status")).toBeEmpty();
+  await expect(dock(page).getByRole("status")).toBeEmpty();
 });
 
 test("two windows show each other's entries", async ({ page, site, context }) => {

@@ -8,7 +8,7 @@ import { BODY, START_MS } from "./samples.ts";
 const someId = fc.constantFrom("a", "b", "c", "d", "e", "f", "g", "h");
 
 /** Any valid record. Clocks are few too, so that ties are met. */
-export const anyRecord: fc.Arbitrary<JournalRecord> = fc
+const anyRecord: fc.Arbitrary<JournalRecord> = fc
   .record({
     id: someId,
     names: someId,

@@ -148,11 +148,7 @@ function grown(values: Float64Array): Float64Array<ArrayBuffer> {
   return larger;
 }
 
-function readingOf(
-  format: LineFormat,
-  read: ReadPoints,
-  skipped: SkippedLines,
-): ScanReading {
+function readingOf(format: LineFormat, read: ReadPoints, skipped: SkippedLines): ScanReading {
   const { frequencies, levels, duplicateCount } = sortedPoints(read);
   const highest = frequencies.at(-1);
   if (highest === undefined || frequencies.length < 2)
