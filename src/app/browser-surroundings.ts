@@ -1,6 +1,6 @@
 import { v7 as newId } from "uuid";
 import type { Surroundings } from "../models/surroundings.ts";
-import { createKeptStore } from "../storage/kept-store.ts";
+import type { KeptStore } from "../storage/kept-store.ts";
 import { createKeptTexts, createLocalTexts } from "./kept-texts.ts";
 import { createScreenLock } from "./screen-lock.ts";
 import { shareFile, shareText } from "./sharing.ts";
@@ -9,9 +9,11 @@ const DEVICE_KEY = "device";
 const NUDGE_MS = 30;
 
 /** The phone as the models see it. The only place with clock, ids, randomness and navigator. */
-export function createBrowserSurroundings(): Surroundings & { loadKept(): Promise<void> } {
+export function createBrowserSurroundings(
+  kept: KeptStore,
+): Surroundings & { loadKept(): Promise<void> } {
   const emergencyKeep = createLocalTexts();
-  const keep = createKeptTexts(emergencyKeep, createKeptStore());
+  const keep = createKeptTexts(emergencyKeep, kept);
   const device = emergencyKeep.read(DEVICE_KEY) ?? newId().slice(-12);
   emergencyKeep.write(DEVICE_KEY, device);
   return {

@@ -25,12 +25,13 @@ import { startOffline } from "./start-offline.ts";
 
 const ASKED_KEY = "asked-to-persist";
 
-const surroundings = createBrowserSurroundings();
+const store = createIdbStore();
+const surroundings = createBrowserSurroundings(store.kept);
 const mishap = createMishapModel();
 addEventListener("error", ({ error, message }) => mishap.report(error ?? message));
 addEventListener("unhandledrejection", ({ reason }) => mishap.report(reason));
 
-const journal = createJournalModel(createIdbStore(), surroundings);
+const journal = createJournalModel(store, surroundings);
 const navigation = createNavigationModel(createAddressBar());
 const restoreAgain = restorePlace(surroundings.keep, navigation);
 const notices = createNoticeModel();

@@ -1,6 +1,7 @@
+import { LOSS_LIMITS_DB } from "./level-limits.ts";
+import { TEMPERATURE_LIMITS_K } from "./noise-limits.ts";
 import { noiseFigureFromTemperatureDb } from "./noise-temperature.ts";
 import { requireRange } from "./require-range.ts";
-import { LOSS_LIMITS_DB, TEMPERATURE_LIMITS_K } from "./signal-limits.ts";
 
 /**
  * Noise figure of anything that only loses signal: cable, connector, splitter, passive filter.

@@ -1,6 +1,6 @@
+import { LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import { lessOneDb, onePlusDb } from "./one-plus-ratio.ts";
 import { requireRange } from "./require-range.ts";
-import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 
 /**
  * How much gain a weak wanted carrier loses beside a strong one in the same amplifier: more than the
@@ -11,8 +11,8 @@ import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
  * Assumes: the law of gainCompressionDb; the wanted carrier is far weaker, on another frequency.
  * Not for: receivers whose automatic gain control or selectivity acts before the amplifier.
  *
- * @param blockerDbm           Strong carrier at the input. [dBm], −400 to 200
- * @param compressionPointDbm  1 dB compression point at the input. [dBm], −400 to 200
+ * @param blockerDbm           Strong carrier at the input. [dBm], −300 to 300
+ * @param compressionPointDbm  1 dB compression point at the input. [dBm], −300 to 300
  * @returns                    Loss of gain for the wanted carrier: 1.94 dB when the blocker is at that point. [dB], 0 or more
  * @throws RangeError          If an input lies outside its range or is NaN.
  * @accuracy                   exact for the model. Far below the point the loss is twice that of gainCompressionDb, far

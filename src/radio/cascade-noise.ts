@@ -1,8 +1,8 @@
 import type { Limits } from "./limits.ts";
+import { NOISE_FIGURE_LIMITS_DB } from "./noise-limits.ts";
 import { lessOneDb, onePlusDb } from "./one-plus-ratio.ts";
 import { powerSumDb } from "./power-sum.ts";
 import { requireRange } from "./require-range.ts";
-import { GAIN_LIMITS_DB, NOISE_FIGURE_LIMITS_DB } from "./signal-limits.ts";
 
 /** One part of a receiving chain. [dB] both; a loss is a gain below 0. */
 export interface NoiseStage {
@@ -12,6 +12,8 @@ export interface NoiseStage {
 
 /** Of a chain; an antenna line has about ten stages. */
 export const STAGE_COUNT_LIMITS: Limits = { min: 1, max: 40 };
+/** As wide as a loss may be, for a stage may be a long cable. */
+const STAGE_GAIN_LIMITS_DB: Limits = { min: -300, max: 300 };
 /** A stage with less than this adds nothing that a number could hold. */
 const SILENT_BELOW_DB = 1e-300;
 
@@ -41,7 +43,7 @@ export function cascadeNoiseFigureDb(stages: readonly NoiseStage[]): number {
   const addedDb: number[] = [];
   let gainBeforeDb = 0;
   for (const { gainDb, noiseFigureDb } of stages) {
-    requireRange("cascadeNoiseFigureDb", GAIN_LIMITS_DB, { gainDb });
+    requireRange("cascadeNoiseFigureDb", STAGE_GAIN_LIMITS_DB, { gainDb });
     requireRange("cascadeNoiseFigureDb", NOISE_FIGURE_LIMITS_DB, { noiseFigureDb });
     if (noiseFigureDb > SILENT_BELOW_DB) addedDb.push(lessOneDb(noiseFigureDb) - gainBeforeDb);
     gainBeforeDb += gainDb;

@@ -1,7 +1,7 @@
+import { LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import { NOISE_RISE_LIMITS_DB } from "./noise-rise.ts";
 import { lessOneDb, onePlusDb } from "./one-plus-ratio.ts";
 import { requireRange } from "./require-range.ts";
-import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 
 /** Data sheets state the blocking level for this loss of sensitivity. [dB] */
 const STATED_LOSS_DB = 3;
@@ -15,8 +15,8 @@ const STATED_LOSS_DB = 3;
  * Assumes: what the blocker adds grows with it dB for dB, as mixing noise and out-of-band noise do;
  * the same frequency offset as on the data sheet. Not for: compression, which sets in faster.
  *
- * @param blockerDbm        Strong carrier at the receiver's input. [dBm], −400 to 200
- * @param blockingLevelDbm  Blocker that costs 3 dB of sensitivity, as stated. [dBm], −400 to 200
+ * @param blockerDbm        Strong carrier at the receiver's input. [dBm], −300 to 300
+ * @param blockingLevelDbm  Blocker that costs 3 dB of sensitivity, as stated. [dBm], −300 to 300
  * @returns                 Loss of sensitivity. [dB], 0 or more
  * @throws RangeError       If an input lies outside its range or is NaN.
  * @accuracy                exact at the stated point; elsewhere as good as the assumption
@@ -38,7 +38,7 @@ export function desensitisationDb(blockerDbm: number, blockingLevelDbm: number):
  * Assumes: as desensitisationDb. Not for: a loss of 0, which no blocker causes.
  *
  * @param lossDb            Loss of sensitivity. [dB], 10⁻¹² to 400
- * @param blockingLevelDbm  Blocker that costs 3 dB of sensitivity, as stated. [dBm], −400 to 200
+ * @param blockingLevelDbm  Blocker that costs 3 dB of sensitivity, as stated. [dBm], −300 to 300
  * @returns                 Blocker at the receiver's input. [dBm]
  * @throws RangeError       If an input lies outside its range or is NaN.
  * @accuracy                as desensitisationDb

@@ -1,7 +1,7 @@
+import { LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import type { Limits } from "./limits.ts";
 import { lessOneDb, onePlusDb } from "./one-plus-ratio.ts";
 import { requireRange } from "./require-range.ts";
-import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 
 const COMPRESSION_LIMITS_DB: Limits = { min: 1e-6, max: 300 };
 
@@ -14,8 +14,8 @@ const COMPRESSION_LIMITS_DB: Limits = { min: 1e-6, max: 300 };
  * stated 1 dB point. Not for: amplifiers with a sharper knee, which lose less below the 1 dB point and
  * more above it.
  *
- * @param levelDbm             Carrier at the input. [dBm], −400 to 200
- * @param compressionPointDbm  1 dB compression point at the input. [dBm], −400 to 200
+ * @param levelDbm             Carrier at the input. [dBm], −300 to 300
+ * @param compressionPointDbm  1 dB compression point at the input. [dBm], −300 to 300
  * @returns                    Loss of gain: 1 dB at that point by definition. [dB], 0 or more
  * @throws RangeError          If an input lies outside its range or is NaN.
  * @accuracy                   exact at the 1 dB point and far below it; a model in between and beyond
@@ -40,7 +40,7 @@ export function gainCompressionDb(levelDbm: number, compressionPointDbm: number)
  * Assumes: as gainCompressionDb. Not for: a loss of 0, which no carrier causes.
  *
  * @param compressionDb        Loss of gain. [dB], 10⁻⁶ to 300
- * @param compressionPointDbm  1 dB compression point at the input. [dBm], −400 to 200
+ * @param compressionPointDbm  1 dB compression point at the input. [dBm], −300 to 300
  * @returns                    Carrier at the input. [dBm]
  * @throws RangeError          If an input lies outside its range or is NaN.
  * @accuracy                   as gainCompressionDb

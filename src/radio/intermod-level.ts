@@ -1,6 +1,6 @@
 import { INTERMOD_RECIPES, type IntermodKind, type IntermodRecipe } from "./intermod-kind.ts";
+import { LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import { requireRange } from "./require-range.ts";
-import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 
 /**
  * How strong a product comes out of an amplifier or a receiver's front end.
@@ -12,8 +12,8 @@ import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
  * join in; products made in a transmitter's output stage (transmitterProductDbm).
  *
  * @param product.kind          Which carriers take part
- * @param product.levelsDbm     Levels of the carriers in the order of the letters. [dBm], −400 to 200
- * @param product.interceptDbm  Intercept point of that order: IP3 or IP5. [dBm], −400 to 200
+ * @param product.levelsDbm     Levels of the carriers in the order of the letters. [dBm], −300 to 300
+ * @param product.interceptDbm  Intercept point of that order: IP3 or IP5. [dBm], −300 to 300
  * @returns                     Level of the product, referred to where the levels are. [dBm]
  * @throws RangeError           If a value lies outside its range or is NaN, or the levels are not one to a letter.
  * @accuracy                    exact for a third- or fifth-order characteristic; real ones within a few dB
@@ -43,8 +43,8 @@ export function intermodLevelDbm(product: {
  * made in the measuring receiver itself.
  *
  * @param product.kind        Which carriers take part
- * @param product.levelsDbm   Levels of the carriers in the order of the letters. [dBm], −400 to 200
- * @param product.productDbm  Level of the product at the same place. [dBm], −400 to 200
+ * @param product.levelsDbm   Levels of the carriers in the order of the letters. [dBm], −300 to 300
+ * @param product.productDbm  Level of the product at the same place. [dBm], −300 to 300
  * @returns                   Intercept point of that order at the same place. [dBm]
  * @throws RangeError         If a value lies outside its range or is NaN, or the levels are not one to a letter.
  * @accuracy                  as intermodLevelDbm
@@ -71,8 +71,8 @@ export function interceptFromProductDbm(product: {
  * Assumes: as intermodLevelDbm, all carriers equal. Not for: one strong carrier among weak ones.
  *
  * @param product.kind          Which carriers take part
- * @param product.productDbm    Highest product that is acceptable, at the input. [dBm], −400 to 200
- * @param product.interceptDbm  Intercept point of that order at the input. [dBm], −400 to 200
+ * @param product.productDbm    Highest product that is acceptable, at the input. [dBm], −300 to 300
+ * @param product.interceptDbm  Intercept point of that order at the input. [dBm], −300 to 300
  * @returns                     Level of each carrier at the input. [dBm]
  * @throws RangeError           If a value lies outside its range or is NaN.
  * @accuracy                    as intermodLevelDbm

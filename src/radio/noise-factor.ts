@@ -1,6 +1,6 @@
 import type { Limits } from "./limits.ts";
+import { NOISE_FIGURE_LIMITS_DB } from "./noise-limits.ts";
 import { requireRange } from "./require-range.ts";
-import { NOISE_FIGURE_LIMITS_DB } from "./signal-limits.ts";
 
 const NOISE_FACTOR_LIMITS: Limits = { min: 1, max: 1e40 };
 

@@ -1,5 +1,5 @@
+import { NOISE_FIGURE_LIMITS_DB } from "./noise-limits.ts";
 import { requireRange } from "./require-range.ts";
-import { NOISE_FIGURE_LIMITS_DB } from "./signal-limits.ts";
 import { REFERENCE_TEMPERATURE_K, thermalNoiseDbm } from "./thermal-noise.ts";
 
 /**

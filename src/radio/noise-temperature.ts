@@ -1,6 +1,6 @@
 import type { Limits } from "./limits.ts";
+import { NOISE_FIGURE_LIMITS_DB } from "./noise-limits.ts";
 import { requireRange } from "./require-range.ts";
-import { NOISE_FIGURE_LIMITS_DB } from "./signal-limits.ts";
 import { REFERENCE_TEMPERATURE_K } from "./thermal-noise.ts";
 
 const NOISE_TEMPERATURE_LIMITS_K: Limits = { min: 0, max: 1e43 };

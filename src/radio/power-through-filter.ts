@@ -1,7 +1,7 @@
+import { LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import { FREQUENCY_LIMITS_MHZ, type Limits } from "./limits.ts";
 import { powerSumDb } from "./power-sum.ts";
 import { requireRange } from "./require-range.ts";
-import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 
 /** What arrives on one frequency: a carrier, or the noise or signal of one channel. */
 export interface ReceivedLevel {
@@ -27,7 +27,7 @@ const FILTER_LOSS_LIMITS_DB: Limits = { min: 0, max: 17_000 };
  * Assumes: each entry narrow beside the filter's slope; entries unrelated, so that powers add.
  * Not for: a wide channel across an edge; cut it into slices.
  *
- * @param received      Frequency and level of each. [MHz], 0.003 to 3 000 000; [dBm], −400 to 200; at least one
+ * @param received      Frequency and level of each. [MHz], 0.003 to 3 000 000; [dBm], −300 to 300; at least one
  * @param lossAtDb      Loss of the filter at a frequency in MHz, insertion loss included. [dB], 0 to 17 000
  * @returns             Levels behind the filter, and the sums before and behind it. [dBm]
  * @throws RangeError   If there is no entry, or a value lies outside its range or is NaN.

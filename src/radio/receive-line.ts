@@ -1,7 +1,7 @@
 import { attenuatorNoiseFigureDb } from "./attenuator-noise.ts";
 import { cascadeNoiseFigureDb, type NoiseStage, STAGE_COUNT_LIMITS } from "./cascade-noise.ts";
+import { LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import { requireRange } from "./require-range.ts";
-import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 import { systemNoiseFigureDb } from "./system-noise.ts";
 import { REFERENCE_TEMPERATURE_K, thermalNoiseDbm } from "./thermal-noise.ts";
 
@@ -33,7 +33,7 @@ export interface LinePoint {
  *
  * @param line.elements        In the order of the signal: lossDb and temperatureK as attenuatorNoiseFigureDb takes
  *                             them, gainDb −300 to 300 and noiseFigureDb 0 to 400; 1 to 40 of them. [dB], [K]
- * @param line.levelDbm        Carrier at the antenna's output. [dBm], −400 to 200
+ * @param line.levelDbm        Carrier at the antenna's output. [dBm], −300 to 300
  * @param line.bandwidthHz     Noise bandwidth of the receiver. [Hz], 1 to 10¹²
  * @param line.antennaNoiseDb  What the antenna picks up over kT0B; 0 for surroundings at 290 K. [dB], −100 to 300
  * @returns                    One point for each element; the last stands for the whole line

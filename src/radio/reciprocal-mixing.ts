@@ -1,6 +1,7 @@
+import { LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import type { Limits } from "./limits.ts";
+import { BANDWIDTH_LIMITS_HZ } from "./noise-limits.ts";
 import { requireRange } from "./require-range.ts";
-import { BANDWIDTH_LIMITS_HZ, LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 
 const PHASE_NOISE_LIMITS_DBC: Limits = { min: -300, max: 0 };
 
@@ -12,7 +13,7 @@ const PHASE_NOISE_LIMITS_DBC: Limits = { min: -300, max: 0 };
  * Assumes: phase noise flat across the channel, unrelated to the carrier's modulation. Not for: the
  * noise that the neighbour sends out itself, which no receiver can remove.
  *
- * @param mixing.blockerDbm     Strong carrier at the receiver's input. [dBm], −400 to 200
+ * @param mixing.blockerDbm     Strong carrier at the receiver's input. [dBm], −300 to 300
  * @param mixing.phaseNoiseDbc  Oscillator's noise at the offset of the blocker, over 1 Hz. [dBc/Hz], −300 to 0
  * @param mixing.bandwidthHz    Noise bandwidth of the receiver. [Hz], 1 to 10¹²
  * @returns                     Noise power referred to the input. [dBm]
@@ -42,7 +43,7 @@ export function reciprocalMixingNoiseDbm(mixing: {
  *
  * Assumes: as reciprocalMixingNoiseDbm. Not for: blockers so strong that the input is overdriven first.
  *
- * @param mixing.noiseDbm       Highest mixing noise that is acceptable, at the input. [dBm], −400 to 200
+ * @param mixing.noiseDbm       Highest mixing noise that is acceptable, at the input. [dBm], −300 to 300
  * @param mixing.phaseNoiseDbc  Oscillator's noise at the offset of the blocker, over 1 Hz. [dBc/Hz], −300 to 0
  * @param mixing.bandwidthHz    Noise bandwidth of the receiver. [Hz], 1 to 10¹²
  * @returns                     Blocker at the receiver's input. [dBm]

@@ -1,5 +1,5 @@
+import { LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import { requireRange } from "./require-range.ts";
-import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 
 /**
  * How far two equal carriers may stand above the floor before their third-order products show.
@@ -9,8 +9,8 @@ import { LEVEL_LIMITS_DBM } from "./signal-limits.ts";
  * Assumes: intercept point and floor at the input, products of the kind 2A−B. Not for: receivers that
  * are limited by blocking or mixing noise before products appear.
  *
- * @param interceptDbm  Third-order intercept point at the input. [dBm], −400 to 200
- * @param floorDbm      Noise floor at the input. [dBm], −400 to 200
+ * @param interceptDbm  Third-order intercept point at the input. [dBm], −300 to 300
+ * @param floorDbm      Noise floor at the input. [dBm], −300 to 300
  * @returns             Spurious-free dynamic range; below 0 if even carriers below the floor would make them. [dB]
  * @throws RangeError   If an input lies outside its range or is NaN.
  * @accuracy            exact for the assumptions

@@ -1,5 +1,5 @@
+import { BANDWIDTH_LIMITS_HZ, TEMPERATURE_LIMITS_K } from "./noise-limits.ts";
 import { requireRange } from "./require-range.ts";
-import { BANDWIDTH_LIMITS_HZ, TEMPERATURE_LIMITS_K } from "./signal-limits.ts";
 
 /**
  * Boltzmann constant. [J/K], exact since 2019.

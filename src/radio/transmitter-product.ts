@@ -1,7 +1,7 @@
 import { freeSpaceLossDb } from "./free-space-loss.ts";
+import { GAIN_LIMITS_DB, LEVEL_LIMITS_DBM } from "./level-limits.ts";
 import type { Limits } from "./limits.ts";
 import { requireRange } from "./require-range.ts";
-import { GAIN_LIMITS_DB, LEVEL_LIMITS_DBM } from "./signal-limits.ts";
 import { wavelengthM } from "./wavelength.ts";
 
 const TURNAROUND_LIMITS_DB: Limits = { min: 0, max: 200 };
@@ -17,10 +17,10 @@ const SPACING_MAX_M = 1e6;
  * follows B dB for dB. Not for: transmitters that touch or share a pocket, where no distance says how
  * they couple.
  *
- * @param pair.neighbourDbm      Power that B radiates over an isotropic antenna. [dBm], −400 to 200
+ * @param pair.neighbourDbm      Power that B radiates over an isotropic antenna. [dBm], −300 to 300
  * @param pair.spacingM          Distance between the antennas. [m], λ to 10⁶
  * @param pair.frequencyMhz      Carrier frequency of B. [MHz], 0.003 to 3 000 000
- * @param pair.gainDbi           Gain of A's antenna towards B. [dBi], −300 to 300
+ * @param pair.gainDbi           Gain of A's antenna towards B. [dBi], −100 to 100
  * @param pair.turnaroundLossDb  How much weaker the product comes out than B's carrier went in. [dB], 0 to 200
  * @returns                      Product at the output of A. [dBm]
  * @throws RangeError            If an input lies outside its range or is NaN, or the spacing is below one wavelength.
@@ -55,10 +55,10 @@ export function transmitterProductDbm(pair: {
  * Assumes: as transmitterProductDbm. Not for: results below one wavelength, which only say that the
  * wish is met wherever the formula holds; the caller has to compare.
  *
- * @param pair.neighbourDbm      Power that B radiates over an isotropic antenna. [dBm], −400 to 200
- * @param pair.productDbm        Highest product that is acceptable at the output of A. [dBm], −400 to 200
+ * @param pair.neighbourDbm      Power that B radiates over an isotropic antenna. [dBm], −300 to 300
+ * @param pair.productDbm        Highest product that is acceptable at the output of A. [dBm], −300 to 300
  * @param pair.frequencyMhz      Carrier frequency of B. [MHz], 0.003 to 3 000 000
- * @param pair.gainDbi           Gain of A's antenna towards B. [dBi], −300 to 300
+ * @param pair.gainDbi           Gain of A's antenna towards B. [dBi], −100 to 100
  * @param pair.turnaroundLossDb  How much weaker the product comes out than B's carrier went in. [dB], 0 to 200
  * @returns                      Distance between the antennas; may lie outside what transmitterProductDbm
  *                               accepts. [m], above 0

@@ -2,6 +2,7 @@ import { readRow } from "../journal/reading.ts";
 import type { JournalRecord } from "../journal/records.ts";
 import type { JournalStore, SetAside } from "../journal/store.ts";
 import { createConnection } from "./connection.ts";
+import { createKeptStore, type KeptStore } from "./kept-store.ts";
 import { CHANNEL_NAME, LOCK, LOCK_KEY, RECORDS, SET_ASIDE } from "./names.ts";
 
 /**
@@ -10,7 +11,9 @@ import { CHANNEL_NAME, LOCK, LOCK_KEY, RECORDS, SET_ASIDE } from "./names.ts";
  *
  * @param openTimeoutMs  How long the database may take to open. [ms], > 0
  */
-export function createIdbStore({ openTimeoutMs = 4000 } = {}): JournalStore {
+export function createIdbStore({ openTimeoutMs = 4000 } = {}): JournalStore & {
+  readonly kept: KeptStore;
+} {
   let isLoaded = false;
   const replacedHearers: (() => void)[] = [];
   const channel = new BroadcastChannel(CHANNEL_NAME);
@@ -39,6 +42,8 @@ export function createIdbStore({ openTimeoutMs = 4000 } = {}): JournalStore {
     });
 
   return {
+    kept: createKeptStore(connection),
+
     async load() {
       isLoaded = false;
       const read = await connection.transact([RECORDS, SET_ASIDE], async (transaction) => {

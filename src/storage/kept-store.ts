@@ -1,4 +1,4 @@
-import { createConnection } from "./connection.ts";
+import type { Connection } from "./connection.ts";
 import { KEPT } from "./names.ts";
 
 /** Short texts (the place on the screen, drafts, settings) beside the journal. */
@@ -10,19 +10,10 @@ export interface KeptStore {
 }
 
 /**
- * Kept texts on IndexedDB. localStorage alone would not do: a browser writes it to the phone only
- * some seconds later, and a killed app has no such seconds.
- *
- * @param openTimeoutMs  How long the database may take to open. [ms], > 0
+ * Kept texts in the journal's database. localStorage alone would not do: a browser writes it to the
+ * phone only some seconds later, and a killed app has no such seconds.
  */
-export function createKeptStore({ openTimeoutMs = 4000 } = {}): KeptStore {
-  let hasOpened = false;
-  const connection = createConnection({
-    openTimeoutMs,
-    // A database that vanished is made anew by the journal alone, which has to say so.
-    mayCreate: () => !hasOpened,
-    onReplaced: () => {},
-  });
+export function createKeptStore(connection: Connection): KeptStore {
   const waiting = new Map<string, string | null>();
   let isWriting = false;
 
@@ -49,9 +40,7 @@ export function createKeptStore({ openTimeoutMs = 4000 } = {}): KeptStore {
         const [keys, texts] = await Promise.all([store.getAllKeys(), store.getAll()]);
         return new Map(keys.map((key, index) => [key, String(texts[index])]));
       });
-      if (read.kind === "failed") return null;
-      hasOpened = true;
-      return read.value;
+      return read.kind === "failed" ? null : read.value;
     },
     write(key, text) {
       waiting.set(key, text);

@@ -2,7 +2,6 @@ import "fake-indexeddb/auto";
 import { IDBFactory } from "fake-indexeddb";
 import { beforeEach, describe, expect, it } from "vitest";
 import { createIdbStore } from "../../src/storage/idb-store.ts";
-import { createKeptStore } from "../../src/storage/kept-store.ts";
 
 beforeEach(() => {
   globalThis.indexedDB = new IDBFactory();
@@ -10,12 +9,12 @@ beforeEach(() => {
 
 /** The texts as a later start of the app finds them, once all writes are through. */
 async function atNextStart(): Promise<ReadonlyMap<string, string> | null> {
-  return createKeptStore().readAll();
+  return createIdbStore().kept.readAll();
 }
 
 describe("kept texts", () => {
   it("are there at the next start, the latest of each key", async () => {
-    const store = createKeptStore();
+    const store = createIdbStore().kept;
     await store.readAll();
     for (const text of ["a", "ab", "abc"]) store.write("note", text);
     store.write("place", "#/rig");
@@ -29,7 +28,7 @@ describe("kept texts", () => {
   });
 
   it("are gone when they have been removed", async () => {
-    const store = createKeptStore();
+    const store = createIdbStore().kept;
     store.write("note", "a");
     await expect.poll(async () => (await atNextStart())?.size).toBe(1);
     store.write("note", null);
@@ -37,15 +36,15 @@ describe("kept texts", () => {
   });
 
   it("live beside the journal in one database, whichever of the two makes it", async () => {
-    const store = createKeptStore();
-    const [texts, journal] = await Promise.all([store.readAll(), createIdbStore().load()]);
+    const store = createIdbStore();
+    const [texts, journal] = await Promise.all([store.kept.readAll(), store.load()]);
     expect(texts?.size).toBe(0);
     expect(journal).toMatchObject({ kind: "ok", records: [] });
   });
 
   it("answer null where there is no database", async () => {
     Object.defineProperty(globalThis, "indexedDB", { value: undefined, configurable: true });
-    expect(await createKeptStore().readAll()).toBeNull();
+    expect(await createIdbStore().kept.readAll()).toBeNull();
     Object.defineProperty(globalThis, "indexedDB", {
       value: new IDBFactory(),
       configurable: true,

@@ -22,7 +22,6 @@ export interface ScanReader {
 const SAMPLE_LINES = 200;
 /** Control characters that no text has; a file in a two-byte encoding is full of zeros. */
 const NOT_TEXT = /\p{Cc}(?<!\s)/u;
-const BYTE_ORDER_MARK = "\uFEFF";
 const LEVEL_LIMIT = 300;
 /** The highest frequency of the Radio Regulations in the smallest unit. [Hz] */
 const FREQUENCY_LIMIT = 3e12;
@@ -30,6 +29,7 @@ const FREQUENCY_LIMIT = 3e12;
 /**
  * Begins to read delimited text with two columns of numbers, frequency and level. Delimiter, decimal
  * mark, order of the columns and units are told from the text. Never throws, whatever the text holds.
+ * A byte order mark needs no care: it counts as a blank.
  *
  * @param byteCount  Size of the whole text, told beforehand: too large a one is not begun
  */
@@ -50,7 +50,6 @@ export function scanReader(byteCount: number): ScanReader {
   let count = 0;
   let line = 0;
   let pending = "";
-  let isBegun = false;
 
   const fail = (code: ScanProblemCode, at: number | null): void => {
     problem ??= { kind: "problem", code, line: at };
@@ -122,12 +121,9 @@ export function scanReader(byteCount: number): ScanReader {
     take(slice) {
       if (problem !== null) return false;
       const text = pending + slice;
-      if (!isBegun && text === "") return true;
-      const begun = isBegun || !text.startsWith(BYTE_ORDER_MARK) ? text : text.slice(1);
-      isBegun = true;
       // A carriage return at the end may be the first half of a line's end.
-      const isHalf = begun.endsWith("\r");
-      takeText((isHalf ? begun.slice(0, -1) : begun).replace(/\r\n?/g, "\n"));
+      const isHalf = text.endsWith("\r");
+      takeText((isHalf ? text.slice(0, -1) : text).replace(/\r\n?/g, "\n"));
       if (isHalf) pending += "\r";
       return problem === null;
     },
