@@ -118,7 +118,7 @@ test("spills no light in the default theme, on any screen", async ({ page, site 
   expect(bright).toEqual([]);
 });
 
-test("every target takes a thumb: 48 px and 8 px from its neighbour, at both widths", async ({
+test("every target takes a thumb: 48 px and 8 px from its neighbour, upright, narrow and lying", async ({
   page,
   site,
 }) => {
@@ -126,6 +126,7 @@ test("every target takes a thumb: 48 px and 8 px from its neighbour, at both wid
   for (const viewport of [
     { width: 360, height: 740 },
     { width: 320, height: 568 },
+    { width: 740, height: 360 },
   ]) {
     await page.setViewportSize(viewport);
     await page.context().clearCookies();
@@ -157,6 +158,9 @@ test("every target takes a thumb: 48 px and 8 px from its neighbour, at both wid
                 problems.push(`${screen}: ${a.text} / ${b.text}: ${Math.max(across, down)} px`);
             }
           });
+          for (const { text, box } of boxes)
+            if (box.right > innerWidth + 0.5 || box.left < -0.5)
+              problems.push(`${screen}: ${text} reaches beyond the screen`);
           if (document.documentElement.scrollWidth > innerWidth)
             problems.push(`${screen}: wider than the screen`);
           return problems;

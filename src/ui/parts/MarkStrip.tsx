@@ -21,7 +21,12 @@ export function MarkStrip({ marks, timeZone }: { marks: readonly MarkView[]; tim
   return (
     <figure>
       <figcaption class="number">{summary}</figcaption>
-      <svg class="picture" viewBox={`0 0 ${WIDTH} 24`} aria-hidden="true">
+      <svg
+        class="picture strip"
+        viewBox={`0 0 ${WIDTH} 24`}
+        preserveAspectRatio="xMinYMid meet"
+        aria-hidden="true"
+      >
         <line x1={EDGE} x2={WIDTH - EDGE} y1="18" y2="18" stroke="currentColor" />
         {marks.map((mark) => (
           <path
