@@ -51,7 +51,7 @@ export function fieldCorrelationRatio(spacingM: number, frequencyMhz: number): n
  * @param frequencyMhz  Carrier frequency. [MHz], 0.003 to 3 000 000
  * @returns             Correlation of the received powers, from 0 to 1. [none]
  * @throws RangeError   If an input lies outside its range or is NaN.
- * @accuracy            exact for the powers; for the amplitudes within 0.02
+ * @accuracy            exact for the powers; for the amplitudes within 0.03
  * @source              as fieldCorrelationRatio: powers of complex Gaussian fields correlate as the square
  * @differs             none
  * @checkedBy           spacing-0-1-envelope, spacing-0-25-envelope, spacing-0-5-envelope,

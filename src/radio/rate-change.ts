@@ -39,7 +39,7 @@ function chanceOfAtLeast(hits: number, misses: number, share: number): number {
  *
  * @param counted       beforeCount, afterCount [none], 0 to 10 000; watchRatio, time after over time
  *                      before [none], 10⁻⁵ to 10⁵
- * @returns             One-sided p-value, above 0 and at most 1. [none]
+ * @returns             One-sided p-value, from 0 to 1. [none]
  * @throws RangeError   If an input lies outside its range or is NaN, or a count is not whole.
  * @accuracy            relative, 10⁻⁹
  * @source              J. Przyborowski, H. Wilenski, Homogeneity of results in testing samples from Poisson
@@ -66,7 +66,7 @@ export function rateDropProbability(counted: BeforeAndAfter): number {
  *
  * @param counted       beforeCount, afterCount [none], 0 to 10 000; watchRatio, time after over time
  *                      before [none], 10⁻⁵ to 10⁵
- * @returns             Two-sided p-value, above 0 and at most 1. [none]
+ * @returns             Two-sided p-value, from 0 to 1. [none]
  * @throws RangeError   If an input lies outside its range or is NaN, or a count is not whole.
  * @accuracy            relative, 10⁻⁹
  * @source              M. P. Fay, vignette of the R package rateratio.test (9 May 2022), section 1, read

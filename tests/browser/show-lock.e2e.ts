@@ -19,6 +19,8 @@ import {
   writeLock,
 } from "./show-lock.ts";
 
+const hasWaiting = (page: Page) =>
+  page.evaluate(async () => (await navigator.serviceWorker.getRegistration())?.waiting != null);
 const databaseNames = (page: Page) =>
   page.evaluate(async () => (await indexedDB.databases()).map(({ name }) => name));
 
@@ -71,11 +73,7 @@ test.describe("an open show", () => {
     await expectReady(again, "first");
     await expect(field(again, "version")).toHaveText(version);
     // The new version's worker is the one that serves the old version.
-    expect(
-      await again.evaluate(async () =>
-        Boolean((await navigator.serviceWorker.getRegistration())?.waiting),
-      ),
-    ).toBe(false);
+    expect(await hasWaiting(again)).toBe(false);
     await expect(field(again, "update")).toHaveText("waiting");
     await press(again, "late");
     await expect(field(again, "late")).toHaveText("late part of first");
@@ -115,13 +113,7 @@ test.describe("an open show", () => {
     await unlockShow(held);
     await site.publish(pages.third);
     await check(held, "found");
-    await expect
-      .poll(() =>
-        held.evaluate(async () =>
-          Boolean((await navigator.serviceWorker.getRegistration())?.waiting),
-        ),
-      )
-      .toBe(true);
+    await expect.poll(() => hasWaiting(held)).toBe(true);
     await lockShow(held);
     await killHeld();
     await site.stop();
@@ -132,6 +124,78 @@ test.describe("an open show", () => {
     await last.reload();
     await expectReady(last, "third");
     expect(await cacheNames(last)).toHaveLength(1);
+  });
+
+  test("keeps the running version, not a forgotten older one", async ({
+    openBrowser,
+    site,
+    pages,
+  }) => {
+    const { page, kill } = await openBrowser();
+    await withWaiting(page, site, pages.second);
+    // As a clearing would leave it that was cut short.
+    await page.evaluate(async () => {
+      const cache = await caches.open("fadewright-00000000 /");
+      const page = new URL("./", location.href).href;
+      await cache.put(page, new Response("<h1>forgotten</h1>"));
+      await cache.put("./~complete", new Response(JSON.stringify({ at: 1, keys: [page] })));
+    });
+    await lockShow(page);
+    await kill();
+    const { page: held } = await openBrowser();
+    await held.goto(site.url);
+    await expectReady(held, "first");
+    expect(await cacheNames(held)).toHaveLength(2);
+  });
+
+  test("gives way to the version after it, when a third one waits already", async ({
+    openBrowser,
+    site,
+    pages,
+  }) => {
+    const { page, kill } = await openBrowser();
+    await withWaiting(page, site, pages.second);
+    await lockShow(page);
+    await kill();
+    const { page: held } = await openBrowser();
+    await held.goto(site.url);
+    await expectReady(held, "first");
+    await unlockShow(held);
+    await site.publish(pages.third);
+    await check(held, "found");
+    await expect.poll(() => hasWaiting(held)).toBe(true);
+    await held.reload();
+    await expectReady(held, "second");
+    await expect(field(held, "update")).toHaveText("waiting");
+    await site.stop();
+    await press(held, "take");
+    await expectReady(held, "third");
+    expect(await cacheNames(held)).toHaveLength(1);
+  });
+
+  test("holds nothing back if the database can't tell of it when the version changes", async ({
+    context,
+    page,
+    site,
+    pages,
+  }) => {
+    await withWaiting(page, site, pages.second);
+    await lockShow(page);
+    // A window past the worker: the change of version does not wait for it.
+    const other = await context.newPage();
+    await other.goto(site.url);
+    const protocol = await context.newCDPSession(other);
+    const isLoaded = other.waitForEvent("load");
+    await protocol.send("Page.reload", { ignoreCache: true });
+    await isLoaded;
+    await expect(other.locator("h1")).toHaveText("second");
+    await occupyDatabase(other);
+    await page.close();
+    await expect.poll(() => hasWaiting(other)).toBe(false);
+    const last = await context.newPage();
+    await last.goto(site.url);
+    await expectReady(last, "second");
+    await expect(field(last, "update")).toHaveText("none");
   });
 
   test("is taken to go on while the database does not answer", async ({

@@ -164,6 +164,7 @@ describe("an update", () => {
     container.registration.waiting = newer;
     older.become("redundant");
     await vi.waitFor(() => expect(offline.state().update).toBe("waiting"));
+    expect(reload).not.toHaveBeenCalled();
     offline.takeUpdate();
     container.registration.activate();
     await vi.waitFor(() => expect(reload).toHaveBeenCalledTimes(1));

@@ -3,13 +3,13 @@ import { describe, expect, it } from "vitest";
 import { attenuatorNoiseFigureDb } from "../../src/radio/attenuator-noise.ts";
 import { cascadeNoiseFigureDb, type NoiseStage } from "../../src/radio/cascade-noise.ts";
 import { noiseFactor } from "../../src/radio/noise-factor.ts";
+import { NOISE_FIGURE_LIMITS_DB } from "../../src/radio/noise-limits.ts";
 import { noiseFigureFromTemperatureDb } from "../../src/radio/noise-temperature.ts";
-import { GAIN_LIMITS_DB, NOISE_FIGURE_LIMITS_DB } from "../../src/radio/signal-limits.ts";
 import { expectRefused } from "./refused-inputs.ts";
 import { SEEDED, within } from "./samples.ts";
 
 const stage = fc.record({
-  gainDb: within(GAIN_LIMITS_DB),
+  gainDb: within({ min: -300, max: 300 }),
   noiseFigureDb: within(NOISE_FIGURE_LIMITS_DB),
 });
 const chains = fc.array(stage, { minLength: 1, maxLength: 40 });

@@ -220,6 +220,22 @@ describe("halfPowerOffsetRatio, rippleEdges and halfPowerEdges", () => {
     );
   });
 
+  it("are finite and in order for everything that they take", () => {
+    const frequencies = within(FREQUENCY_LIMITS_MHZ);
+    fc.assert(
+      fc.property(frequencies, frequencies, orders, ripples, (a, b, order, rippleDb) => {
+        if (a === b) return;
+        const edges = { lowEdgeMhz: Math.min(a, b), highEdgeMhz: Math.max(a, b) };
+        for (const convert of [rippleEdges, halfPowerEdges]) {
+          const { lowEdgeMhz, highEdgeMhz } = convert(edges, { order, rippleDb });
+          expect(lowEdgeMhz > 0 && Number.isFinite(highEdgeMhz)).toBe(true);
+          expect(highEdgeMhz).toBeGreaterThanOrEqual(lowEdgeMhz);
+        }
+      }),
+      SEEDED,
+    );
+  });
+
   it("refuse ripple of half power and more, and edges that do not rise", () => {
     expectRefused(
       "halfPowerOffsetRatio",

@@ -12,7 +12,7 @@ import {
   intermodLevelDbm,
 } from "../../src/radio/intermod-level.ts";
 import { intermodLevelChangeDb } from "../../src/radio/intermod-level-change.ts";
-import { LEVEL_LIMITS_DBM } from "../../src/radio/signal-limits.ts";
+import { LEVEL_LIMITS_DBM } from "../../src/radio/level-limits.ts";
 import { spuriousFreeRangeDb } from "../../src/radio/spurious-free-range.ts";
 import { expectRefused } from "./refused-inputs.ts";
 import { SEEDED, within } from "./samples.ts";
@@ -108,7 +108,7 @@ describe("intermodLevelDbm", () => {
 
   it("and its inverses refuse what is out of range, and a wrong number of levels", () => {
     const pair = { kind: "2A-B" } as const;
-    const outside = { levelDbm: [-401, 201], interceptDbm: [-401, 201], productDbm: [-401, 201] };
+    const outside = { levelDbm: [-301, 301], interceptDbm: [-301, 301], productDbm: [-301, 301] };
     expectRefused(
       "intermodLevelDbm",
       ({ levelDbm, interceptDbm }) =>
@@ -203,7 +203,7 @@ describe("spuriousFreeRangeDb", () => {
       "spuriousFreeRangeDb",
       ({ interceptDbm, floorDbm }) => spuriousFreeRangeDb(interceptDbm, floorDbm),
       { interceptDbm: 5, floorDbm: -94 },
-      { interceptDbm: [-401, 201], floorDbm: [-401, 201] },
+      { interceptDbm: [-301, 301], floorDbm: [-301, 301] },
     );
   });
 });

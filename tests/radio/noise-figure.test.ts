@@ -1,16 +1,13 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { attenuatorNoiseFigureDb } from "../../src/radio/attenuator-noise.ts";
+import { LOSS_LIMITS_DB } from "../../src/radio/level-limits.ts";
 import { noiseFactor, noiseFigureDb } from "../../src/radio/noise-factor.ts";
+import { NOISE_FIGURE_LIMITS_DB, TEMPERATURE_LIMITS_K } from "../../src/radio/noise-limits.ts";
 import {
   noiseFigureFromTemperatureDb,
   noiseTemperatureK,
 } from "../../src/radio/noise-temperature.ts";
-import {
-  LOSS_LIMITS_DB,
-  NOISE_FIGURE_LIMITS_DB,
-  TEMPERATURE_LIMITS_K,
-} from "../../src/radio/signal-limits.ts";
 import { expectRefused } from "./refused-inputs.ts";
 import { SEEDED, within } from "./samples.ts";
 

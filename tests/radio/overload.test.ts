@@ -3,12 +3,12 @@ import { describe, expect, it } from "vitest";
 import { blockingLossDb } from "../../src/radio/blocking-loss.ts";
 import { blockerForLossDbm, desensitisationDb } from "../../src/radio/desensitisation.ts";
 import { gainCompressionDb, levelForCompressionDbm } from "../../src/radio/gain-compression.ts";
+import { LEVEL_LIMITS_DBM } from "../../src/radio/level-limits.ts";
 import { NOISE_RISE_LIMITS_DB, noiseRiseDb } from "../../src/radio/noise-rise.ts";
 import {
   blockerForMixingNoiseDbm,
   reciprocalMixingNoiseDbm,
 } from "../../src/radio/reciprocal-mixing.ts";
-import { LEVEL_LIMITS_DBM } from "../../src/radio/signal-limits.ts";
 import { expectRefused } from "./refused-inputs.ts";
 import { SEEDED, within } from "./samples.ts";
 
@@ -53,8 +53,8 @@ describe("gainCompressionDb", () => {
 
   it("and its inverse refuse what is out of range", () => {
     const outside = {
-      levelDbm: [-401, 201],
-      compressionPointDbm: [-401, 201],
+      levelDbm: [-301, 301],
+      compressionPointDbm: [-301, 301],
       compressionDb: [0, -1, 301],
     };
     expectRefused(
@@ -128,7 +128,7 @@ describe("blockingLossDb", () => {
       "blockingLossDb",
       ({ blockerDbm, compressionPointDbm }) => blockingLossDb(blockerDbm, compressionPointDbm),
       { blockerDbm: -20, compressionPointDbm: 0 },
-      { blockerDbm: [-401, 201], compressionPointDbm: [-401, 201] },
+      { blockerDbm: [-301, 301], compressionPointDbm: [-301, 301] },
     );
   });
 });
@@ -161,13 +161,13 @@ describe("desensitisationDb", () => {
       "desensitisationDb",
       ({ blockerDbm, blockingLevelDbm }) => desensitisationDb(blockerDbm, blockingLevelDbm),
       { blockerDbm: -40, blockingLevelDbm: -30 },
-      { blockerDbm: [-401, 201], blockingLevelDbm: [-401, 201] },
+      { blockerDbm: [-301, 301], blockingLevelDbm: [-301, 301] },
     );
     expectRefused(
       "blockerForLossDbm",
       ({ lossDb, blockingLevelDbm }) => blockerForLossDbm(lossDb, blockingLevelDbm),
       { lossDb: 1, blockingLevelDbm: -30 },
-      { lossDb: [0, -1, 401], blockingLevelDbm: [-401, 201] },
+      { lossDb: [0, -1, 401], blockingLevelDbm: [-301, 301] },
     );
   });
 });
@@ -195,8 +195,8 @@ describe("reciprocalMixingNoiseDbm", () => {
 
   it("and its inverse are finite at the ends of their ranges, and refuse what lies beyond", () => {
     const outside = {
-      blockerDbm: [-401, 201],
-      noiseDbm: [-401, 201],
+      blockerDbm: [-301, 301],
+      noiseDbm: [-301, 301],
       phaseNoiseDbc: [-301, 0.1],
       bandwidthHz: [0, -1, 1e13],
     };

@@ -104,7 +104,7 @@ describe("alongLine", () => {
       "alongLine",
       ({ levelDbm }) => alongLine({ ...LINE, elements: [loss(3)], levelDbm }),
       { levelDbm: -70 },
-      { levelDbm: [-401, 201] },
+      { levelDbm: [-301, 301] },
     );
     expect(() => alongLine({ ...LINE, elements: [] })).toThrow("alongLine: elementCount");
     for (const bad of [Number.NaN, -1]) {

@@ -5,7 +5,7 @@ import {
   BANDWIDTH_LIMITS_HZ,
   NOISE_FIGURE_LIMITS_DB,
   TEMPERATURE_LIMITS_K,
-} from "../../src/radio/signal-limits.ts";
+} from "../../src/radio/noise-limits.ts";
 import { thermalNoiseDbm } from "../../src/radio/thermal-noise.ts";
 import { expectRefused } from "./refused-inputs.ts";
 import { SEEDED, within } from "./samples.ts";

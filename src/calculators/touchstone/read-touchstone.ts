@@ -2,7 +2,7 @@ import type { Complex, Network, OnePortPoint, TwoPortPoint } from "./network.ts"
 import { type Options, readOptions } from "./option-line.ts";
 import { readNumber } from "./read-number.ts";
 
-export type TouchstoneCode =
+type TouchstoneCode =
   /** No line of numbers in it. */
   | "empty"
   /** Longer than any measurement: another kind of file. */

@@ -29,6 +29,8 @@ describe("a scan that can be read", () => {
     ["the end of lines of other systems", "470.5;-90.25\r\n471;-95\r\n"],
     ["the end of lines of old systems", "470.5;-90.25\r471;-95\r"],
     ["a byte order mark", "\uFEFF470.5;-90.25\n471;-95"],
+    ["a byte order mark before a comment", "\uFEFF# sweep\n470.5;-90.25\n471;-95"],
+    ["a byte order mark before quotes", '\uFEFF"470.5","-90.25"\n"471","-95"'],
     ["a byte order mark before a header", "\uFEFFMHz;dBm\r\n470.5;-90.25\r\n471;-95"],
     ["a delimiter at the end of lines", "470.5;-90.25;\n471;-95;"],
     ["comments and blank lines between", "470.5;-90.25\n\n// pause\n  \n% x\n! y\n471;-95\n\n"],
@@ -36,6 +38,8 @@ describe("a scan that can be read", () => {
     ["columns of times", "12:00:01,470.5,-90.25\n12:00:02,471,-95"],
     ["level before frequency, named so", "Level dBm;Frequency MHz\n-90.25;470.5\n-95;471"],
     ["more columns of numbers, named", "No,Freq,RBW,Level\n1,470.5,25,-90.25\n2,471.0,25,-95"],
+    ["frequency named alone", "MHz;x\n470.5;-90.25\n471;-95"],
+    ["many comments with numbers", `${"#;1;2\n".repeat(5)}470.5;-90.25\n471;-95`],
     ["units in the cells", "470.5 MHz -90.25 dBm\n471 MHz -95 dBm"],
     ["powers of ten", "4.705e2;-9.025E+01\n4.71E2;-9.5e1"],
     ["plus signs and the minus sign of typesetters", "+470.5;\u221290.25\n+471;\u221295"],
@@ -128,6 +132,9 @@ describe("the units of a scan", () => {
     ["2.412;-40\n5.8;-41", "ghz", false, "dbm", false],
     // The bandwidth of the filter is not the unit of the column.
     ["RBW: 25 kHz\nx;y\n470;-90\n471;-91", "mhz", false, "dbm", false],
+    // Nor are the numbers of a setting a row.
+    ["Span;470;698\nMHz;dBuV\n470;-90\n471;-91", "mhz", true, "dbuv", true],
+    ["kHz or MHz;dBm or dBuV\n470;-90\n471;-91", "mhz", false, "dbm", false],
     // Field strength is no level.
     ["MHz;dBuV/m\n470;20\n471;21", "mhz", true, "dbuv", false],
   ])("are told from the text: %j", (text, frequency, isNamed, level, isLevelNamed) => {
@@ -192,6 +199,13 @@ describe("a text that is no scan", () => {
     expect(readWhole("470;-90\r\n471;-91\r\n\u0000")).toMatchObject({ code: "not-text", line: 3 });
   });
 
+  it("is given up in the middle of a line without end", () => {
+    const reader = scanReader(SCAN_LIMITS.bytes);
+    const piece = "1;".repeat(500);
+    expect([1, 2, 3, 4, 5].map(() => reader.take(piece))).toEqual([true, true, true, true, false]);
+    expect(reader.end()).toMatchObject({ code: "line-too-long", line: 1 });
+  });
+
   it("keeps refusing after a problem", () => {
     const reader = scanReader(100);
     expect(reader.take("470;-90\n\u0000\n")).toBe(false);
@@ -201,7 +215,10 @@ describe("a text that is no scan", () => {
 
   it("may have 200 000 points but not one more", () => {
     const lines = Array.from({ length: SCAN_LIMITS.points }, (_, n) => `${470 + n / 1e4};-90\n`);
-    expect(codeOf(lines.join(""))).toBe("ok");
+    const points = pointsOf(lines.join(""));
+    expect(points).toHaveLength(SCAN_LIMITS.points);
+    for (const n of [0, 1023, 1024, 100_000, 199_999])
+      expect(points[n]?.[0]).toBeCloseTo(470 + n / 1e4, 9);
     expect(readWhole(`${lines.join("")}999;-90\n`)).toEqual({
       kind: "problem",
       code: "too-many-points",

@@ -93,12 +93,12 @@ describe("readTouchstone", () => {
   });
 
   it.each([
-    ["Hz", "470125000"],
-    ["kHz", "470125"],
-    ["MHz", "470.125"],
-    ["GHz", "0.470125"],
+    ["Hz", "518700000"],
+    ["kHz", "518700"],
+    ["MHz", "518.7"],
+    ["GHz", "0.5187"],
   ])("reads frequencies in %s to the last digit", (unit, figure) => {
-    expect(networkIn(`# ${unit} S MA R 50\n${figure} 1 0`).points[0]?.frequencyMhz).toBe(470.125);
+    expect(networkIn(`# ${unit} S MA R 50\n${figure} 1 0`).points[0]?.frequencyMhz).toBe(518.7);
   });
 
   it("takes GHz, S, magnitude and angle, and 50 ohms where nothing is said", () => {
@@ -122,6 +122,11 @@ describe("readTouchstone", () => {
     expect(network.points.map(({ frequencyMhz }) => frequencyMhz)).toEqual([1, 2]);
     expect(network.points[1]?.s11).toEqual({ re: 0.2, im: 0 });
     expect(network.referenceOhm).toBe(50);
+  });
+
+  it("reads lines that end in a carriage return alone", () => {
+    const network = networkIn("# MHz S RI\r1 0.1 0\r2 0.2 0");
+    expect(network.points.map(({ s11 }) => s11.re)).toEqual([0.1, 0.2]);
   });
 
   it("reads numbers as they may be written", () => {
@@ -151,7 +156,8 @@ describe("readTouchstone, of what it can't read,", () => {
     ["four ports", EXAMPLE_5, 3, "port-count"],
     ["two columns", "1 0", 1, "column-count"],
     ["five columns at the start", "1 0 0 0 0", 1, "column-count"],
-    ["two ports behind one", `1 0 0\n2 ${TWO}`, 2, "column-count"],
+    ["two ports behind one", `1 0 0\n2 ${TWO.slice(2)}`, 2, "column-count"],
+    ["half a pair behind one port", "1 0 0\n2 0", 2, "column-count"],
     ["one port behind two", `${TWO}\n2 0 0`, 2, "column-count"],
     ["noise above the sweep", `${TWO}\n2 .7 .64 69 .38`, 2, "column-count"],
     ["parameters behind noise", `${TWO}\n1 .7 .64 69 .38\n2 0 0 0 0 0 0 0 0`, 3, "column-count"],

@@ -36,7 +36,9 @@ describe("s21Gain", () => {
   it("runs straight in dB between them, not in voltage", () => {
     // Half-way down 40 dB of skirt: −20.8 dB. Straight in voltage it would be −6.7 dB.
     expect(gainDb(510)).toBeCloseTo(-20.8, 9);
-    expect(gainDb(485)).toBeCloseTo(-1, 9);
+    // A fifth and a quarter of the way, by hand: −1.2 + 0.08 and −0.8 − 10.
+    expect(gainDb(476)).toBeCloseTo(-1.12, 9);
+    expect(gainDb(505)).toBeCloseTo(-10.8, 9);
   });
 
   it("is the gain of an amplifier, positive, from port 1 to port 2", () => {
