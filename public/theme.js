@@ -1,4 +1,3 @@
-// Before the first paint; names as in src/models/settings-model.ts.
 try {
   const t = localStorage.getItem("fadewright.theme");
   if (t === "daylight" || t === "deep-red") document.documentElement.dataset.theme = t;

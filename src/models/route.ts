@@ -49,27 +49,6 @@ export function hashOf(route: Route): string {
   }
 }
 
-/** Which of the four places a route belongs to; null for the pages beside them. */
-export function tabOf({ place }: Route): "fault" | "calculators" | "rig" | "log" | null {
-  switch (place) {
-    case "fault":
-    case "trace":
-    case "steps":
-    case "marks":
-    case "close":
-    case "mark":
-      return "fault";
-    case "calculators":
-    case "distance":
-      return "calculators";
-    case "rig":
-    case "log":
-      return place;
-    default:
-      return null;
-  }
-}
-
 function decoded(part: string): string {
   try {
     return decodeURIComponent(part);

@@ -1,20 +1,17 @@
 import type { ComponentChildren } from "preact";
 import type { AppModels } from "../models/app-models.ts";
-import type { tabOf } from "../models/route.ts";
 import * as shellText from "./text/shell.ts";
 import { noticeText, PLACE_NAMES } from "./text/shell.ts";
 
 const PLACES = ["fault", "calculators", "rig", "log"] as const;
 
 /** Always at the thumb: the last acknowledgement, the mark button, the four places. */
-export function Dock(props: {
-  models: AppModels;
-  tab: ReturnType<typeof tabOf>;
-  children: ComponentChildren;
-}) {
-  const { journal, notices, fault } = props.models;
+export function Dock(props: { models: AppModels; children: ComponentChildren }) {
+  const { journal, notices, fault, navigation } = props.models;
   const notice = notices.notice.value;
   const timeZone = journal.openShow.value?.timeZone ?? "UTC";
+  // An address begins with its place: "#/fault/…".
+  const here = navigation.place.value.split("/")[1];
   const hasOpenFault = fault.openFaults.value.length > 0;
   return (
     <div class="dock">
@@ -30,11 +27,7 @@ export function Dock(props: {
       </div>
       <nav class="places" aria-label={shellText.places}>
         {PLACES.map((place) => (
-          <a
-            key={place}
-            href={`#/${place}`}
-            aria-current={props.tab === place ? "page" : undefined}
-          >
+          <a key={place} href={`#/${place}`} aria-current={here === place ? "page" : undefined}>
             {PLACE_NAMES[place]}
           </a>
         ))}

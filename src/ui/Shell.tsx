@@ -1,7 +1,7 @@
 import type { ComponentType } from "preact";
 import { useEffect, useRef } from "preact/hooks";
 import type { AppModels } from "../models/app-models.ts";
-import { type Route, tabOf } from "../models/route.ts";
+import type { Route } from "../models/route.ts";
 import { CalculatorList } from "./calculators/CalculatorList.tsx";
 import { Distance } from "./calculators/Distance.tsx";
 import { KeepDistance } from "./calculators/KeepDistance.tsx";
@@ -82,9 +82,7 @@ export function Shell({ models }: { models: AppModels }) {
           <Content models={models} />
         )}
       </main>
-      <Dock models={models} tab={tabOf(route)}>
-        {Action && <Action models={models} />}
-      </Dock>
+      <Dock models={models}>{Action && <Action models={models} />}</Dock>
     </>
   );
 }

@@ -1,6 +1,6 @@
 import { posix } from "node:path";
-import { Window } from "happy-dom";
 import { type BuiltFile, textOf } from "./built.ts";
+import { parsePage } from "./page.ts";
 
 interface Icon {
   readonly src: string;
@@ -61,7 +61,7 @@ function iconOffences({ src, sizes, type }: Icon, files: readonly BuiltFile[]): 
 
 /** Whatever is wrong with what the page links to: the manifest and the icon of the home screen. */
 export function linkOffences(html: string, files: readonly BuiltFile[]): string[] {
-  const page = new new Window().DOMParser().parseFromString(html, "text/html");
+  const page = parsePage(html);
   const linked = (rel: string) => {
     const address = page.querySelector(`link[rel="${rel}"]`)?.getAttribute("href") ?? "";
     return files.find(({ path }) => path === posix.normalize(address));

@@ -5,13 +5,24 @@ import type { BuiltFile } from "./built.ts";
 const RUNS_AT_ONCE = "theme.js";
 const POLICY = "Content-Security-Policy";
 
-function parse(html: string) {
-  return new new Window().DOMParser().parseFromString(html, "text/html");
+export function parsePage(html: string) {
+  const window = new Window({
+    url: "http://localhost/",
+    // A page that is only looked at asks for nothing; the library would follow its preload links.
+    settings: {
+      fetch: {
+        interceptor: {
+          beforeAsyncRequest: async ({ window: { Response } }) => new Response(""),
+        },
+      },
+    },
+  });
+  return new window.DOMParser().parseFromString(html, "text/html");
 }
 
 /** Addresses of the scripts and stylesheets that a page loads, in order. */
 function loadedBy(html: string): { scripts: string[]; styles: string[] } {
-  const page = parse(html);
+  const page = parsePage(html);
   const addresses = (selector: string, name: string) =>
     [...page.querySelectorAll(selector)].map((one) =>
       posix.normalize(one.getAttribute(name) ?? ""),
@@ -47,7 +58,7 @@ export function chunkOffences(html: string, files: readonly BuiltFile[]): string
 
 /** Whatever a strict policy would refuse, or an attacker could use. */
 export function inlineOffences(html: string): string[] {
-  const page = parse(html);
+  const page = parsePage(html);
   const offences = [
     ...[...page.querySelectorAll("script")]
       .filter((one) => !one.hasAttribute("src") || one.textContent.trim() !== "")
@@ -66,7 +77,7 @@ export function inlineOffences(html: string): string[] {
 
 /** Whatever is wrong with the policy in the page: not first, or open to another origin. */
 export function policyOffences(html: string): string[] {
-  const first = parse(html).head.firstElementChild;
+  const first = parsePage(html).head.firstElementChild;
   if (first?.getAttribute("http-equiv") !== POLICY) return ["the policy is not first in the head"];
   const directives = (first.getAttribute("content") ?? "")
     .split(";")

@@ -2,6 +2,7 @@
 import { h, render } from "preact";
 import { act } from "preact/test-utils";
 import { afterEach, describe, expect, it } from "vitest";
+import { EXPERTISE } from "../../src/facts/expertise.ts";
 import type { StoreFailure } from "../../src/journal/store.ts";
 import { Shell } from "../../src/ui/Shell.tsx";
 import { pretendApp } from "./pretend-app.ts";
@@ -111,8 +112,7 @@ describe("a fault without the fault finder's data file", () => {
     let answers = 0;
     const app = pretendApp("#/fault", async () => {
       answers += 1;
-      const { EXPERTISE } = await import("../../src/facts/expertise.ts");
-      return (answers === 1 ? null : EXPERTISE) as never;
+      return answers === 1 ? null : EXPERTISE;
     });
     const place = await show(app);
     await press(place, "Mark dropout");

@@ -1,6 +1,5 @@
 import { distanceForChangeM, levelChangeDb } from "../../radio/distance-ratio.ts";
 import { farZoneStartM } from "../../radio/far-zone.ts";
-import { freeSpaceLossDb } from "../../radio/free-space-loss.ts";
 import { requireRange } from "../../radio/require-range.ts";
 import { wavelengthM } from "../../radio/wavelength.ts";
 import { DISTANCE_FIELD_IDS, DISTANCE_FIELDS, type DistanceFieldId } from "./fields.ts";
@@ -24,9 +23,6 @@ export type DistanceOutcome =
       readonly powerRatio: number;
       /** Where the wished gain would be met; null if a caution says that no number can be given. [m] */
       readonly distanceForWishM: number | null;
-      /** Loss in free space at the old and the new distance, whatever the exponent. [dB] */
-      readonly freeSpaceLossFromDb: number;
-      readonly freeSpaceLossToDb: number;
       /** Below this distance there is no answer. [m] */
       readonly nearZoneM: number;
       readonly cautions: readonly DistanceCaution[];
@@ -86,8 +82,6 @@ export function distanceOutcome(inputs: DistanceInputs): DistanceOutcome {
     changeDb,
     powerRatio: 10 ** (changeDb / 10),
     distanceForWishM: withheld === null ? wishM : null,
-    freeSpaceLossFromDb: freeSpaceLossDb(fromM, frequencyMhz),
-    freeSpaceLossToDb: freeSpaceLossDb(toM, frequencyMhz),
     nearZoneM,
     cautions,
   };

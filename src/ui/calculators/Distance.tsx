@@ -37,7 +37,7 @@ export function Distance({ models }: { models: AppModels }) {
           <span class="answer">{isOk ? decibels(outcome.changeDb) : "\u2013"}</span>
           <span>
             {isOk
-              ? changeMeaning(outcome.changeDb)
+              ? changeMeaning(outcome.powerRatio)
               : outcome === null
                 ? distanceText.blank
                 : noAnswerText(outcome.reason, outcome.nearZoneM, unit)}

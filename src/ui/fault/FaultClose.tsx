@@ -1,6 +1,7 @@
 import type { ComponentChildren } from "preact";
 import type { AppModels } from "../../models/app-models.ts";
 import { ENDINGS } from "../../models/vocabulary.ts";
+import { Chip } from "../parts/Chip.tsx";
 import { DraftField } from "../parts/DraftField.tsx";
 import * as faultText from "../text/fault.ts";
 import { ENDING_TEXT } from "../text/fault.ts";
@@ -15,7 +16,7 @@ export function FaultClose({ models }: { models: AppModels }) {
     <div class="stack">
       <Choices title={faultText.closeEnding}>
         {ENDINGS.map((ending) => (
-          <Choice
+          <Chip
             key={ending}
             text={ENDING_TEXT[ending]}
             isChosen={ending === model.ending.value}
@@ -25,14 +26,14 @@ export function FaultClose({ models }: { models: AppModels }) {
       </Choices>
       <Choices title={faultText.closeCause}>
         {model.offered.value.map((cause) => (
-          <Choice
+          <Chip
             key={cause}
             text={words.causeName(cause)}
             isChosen={cause === model.cause.value}
             onPick={() => model.pickCause(cause)}
           />
         ))}
-        <Choice
+        <Chip
           text={faultText.closeCauseUnknown}
           isChosen={model.cause.value === null}
           onPick={() => model.pickCause(null)}
@@ -41,14 +42,14 @@ export function FaultClose({ models }: { models: AppModels }) {
       {model.helped.value.length > 0 && (
         <Choices title={faultText.closeRemedy}>
           {model.helped.value.map((remedy) => (
-            <Choice
+            <Chip
               key={remedy}
               text={words.remedyTitle(remedy)}
               isChosen={remedy === model.remedy.value}
               onPick={() => model.pickRemedy(remedy)}
             />
           ))}
-          <Choice
+          <Chip
             text={faultText.closeRemedyNone}
             isChosen={model.remedy.value === null}
             onPick={() => model.pickRemedy(null)}
@@ -77,13 +78,5 @@ function Choices({ title, children }: { title: string; children: ComponentChildr
       </legend>
       <div class="chips">{children}</div>
     </fieldset>
-  );
-}
-
-function Choice(props: { text: string; isChosen: boolean; onPick: () => void }) {
-  return (
-    <button type="button" aria-pressed={props.isChosen} onClick={props.onPick}>
-      {props.text}
-    </button>
   );
 }

@@ -2,6 +2,7 @@ import type { LinkView, MarkView } from "../../journal/views.ts";
 import type { AppModels } from "../../models/app-models.ts";
 import type { FaultModel } from "../../models/fault-model.ts";
 import { PLACES } from "../../models/vocabulary.ts";
+import { Chip } from "../parts/Chip.tsx";
 import * as faultText from "../text/fault.ts";
 import { PLACE_TEXT } from "../text/fault.ts";
 import { timeOf } from "../text/format.ts";
@@ -49,29 +50,25 @@ function Mark(props: {
       <h2 class="number">{time}</h2>
       <div class="chips">
         {links.map((link) => (
-          <button
+          <Chip
             key={link.id}
-            type="button"
-            aria-pressed={mark.links.includes(link.id)}
-            onClick={() => toggle(link.id)}
-          >
-            {link.name}
-          </button>
+            text={link.name}
+            isChosen={mark.links.includes(link.id)}
+            onPick={() => toggle(link.id)}
+          />
         ))}
       </div>
       <p class="soft">{faultText.stage}</p>
       <div class="stage">
         {PLACES.map((place) => (
-          <button
+          <Chip
             key={place}
-            type="button"
-            aria-pressed={mark.place === place}
-            onClick={() =>
+            text={PLACE_TEXT[place]}
+            isChosen={mark.place === place}
+            onPick={() =>
               void model.detailMark(mark.id, mark.links, mark.place === place ? null : place)
             }
-          >
-            {PLACE_TEXT[place]}
-          </button>
+          />
         ))}
       </div>
     </section>

@@ -17,11 +17,11 @@ export const FIELD_LABEL = {
 } as const;
 
 /** One line that says on site what the number means. */
-export function changeMeaning(changeDb: number): string {
-  const ratio = 10 ** (Math.abs(changeDb) / 10);
-  if (Math.abs(changeDb) < 0.05) return "No change at the receiver.";
-  const times = threeFigures(Number(ratio.toPrecision(2)));
-  return changeDb > 0
+export function changeMeaning(powerRatio: number): string {
+  const isMore = powerRatio >= 1;
+  const times = threeFigures(Number((isMore ? powerRatio : 1 / powerRatio).toPrecision(2)));
+  if (times === "1") return "No change at the receiver.";
+  return isMore
     ? `${times} times the power at the receiver.`
     : `1/${times} of the power at the receiver.`;
 }

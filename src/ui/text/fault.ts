@@ -24,12 +24,11 @@ export const evidenceUnit =
   "Evidence in decibels: +10 dB makes it ten times likelier against the rest.";
 export const otherTitle = "Other steps";
 export const reading = "Reading what the fault finder knows…";
-export const unread =
-  "What the fault finder knows could not be read. Marking, the log and the calculators work. Try again.";
+export const unread = "What the fault finder knows could not be read. Everything else works.";
 export const readAgain = "Try again";
 export const otherNone = "Nothing else can be done at this moment of the show.";
 export const exhausted =
-  "Every step has been done or skipped. Close the fault with what you know, or take an answer back.";
+  "Every step is done or skipped. Close the fault with what you know, or take an answer back.";
 export const fallback = "If audio has to be back at once: hand over a cabled microphone.";
 export const gone = "This fault is not in the log on this phone.";
 export const toFaults = "To the faults";

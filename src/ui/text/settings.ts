@@ -7,17 +7,16 @@ export const units = "Lengths in";
 export const offline = "Without network";
 export const ready = "Ready without network: everything is stored on this phone.";
 export const preparing = "Getting ready for use without network…";
-export const failed =
-  "Not ready without network: the download did not finish. Open the app once more with a connection.";
+export const failed = "Not ready without network. Open the app once more with a connection.";
 export const unsupported =
-  "This address can't be made ready for use without network. It takes HTTPS and a browser that allows service workers.";
+  "Can't be made ready for use without network: it takes HTTPS and a browser with service workers.";
 export const version = "Version";
 export const check = "Look for a new version";
 export const locked = "A show is open: the version stays as it is until you close the show.";
 export const storage = "Storage";
 export const persistent = "The browser has agreed not to clear the log by itself.";
 export const notPersistent =
-  "The browser may clear the log when space is short. Share the log after the show.";
+  "The browser may clear the log when space is short: share it after the show.";
 export const askPersist = "Ask the browser to keep it";
 export const unknownUse = "This browser does not tell how much is used.";
 export const used = "used on this phone";

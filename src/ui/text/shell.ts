@@ -16,13 +16,13 @@ export const aside = "Show and settings";
 export const update = "A new version is ready.";
 export const updateNow = "Restart with the new version";
 export const takenElsewhere =
-  "Another window has taken a new version. This one goes on as it is; restart it when you have a pause.";
+  "Another window has taken a new version. Restart this one when you have a pause.";
 export const mishap =
-  "Something in the app went wrong. The log is safe. Go on; where a screen stays empty, choose another place.";
+  "Something in the app went wrong. The log is safe. Go on, or choose another place.";
 export const mishapShare = "Share what happened";
 export const mishapHide = "Hide this line";
 export const replaced =
-  "A newer version in another window has taken over the log. Nothing is lost. Close this window and open the app again.";
+  "A newer version in another window has taken over the log. Nothing is lost. Close this window.";
 
 const FAILURES: Readonly<Record<StoreFailure, string>> = {
   blocked: "Another window holds the log. Close the other windows, then try again.",
