@@ -81,7 +81,8 @@ export default defineConfig({
     environment: "node",
     include: ["tests/**/*.test.{ts,tsx}"],
     setupFiles: ["tests/setup.ts"],
-    reporters: ["default", ["json", { outputFile: "test-results/unit.json" }]],
+    reporters: ["default", "json"],
+    outputFile: { json: "test-results/unit.json" },
     env: { TZ: "UTC", LC_ALL: "C" },
   },
 });
