@@ -28,20 +28,21 @@ export function createNavigationModel(address: AddressBar): NavigationModel {
   address.onChange(() => {
     hash.value = address.hash();
   });
+  const route = computed(() => parseHash(hash.value));
   return {
-    place: computed(() => hash.value.split("?")[0] ?? ""),
+    place: computed(() => hashOf(route.value).split("?")[0] ?? ""),
     hash,
-    route: computed(() => parseHash(hash.value)),
-    go: (route) => {
-      hash.value = hashOf(route);
+    route,
+    go: (next) => {
+      hash.value = hashOf(next);
       address.push(hash.value);
     },
-    replace: (route) => {
-      hash.value = hashOf(route);
+    replace: (next) => {
+      hash.value = hashOf(next);
       address.replace(hash.value);
     },
-    retype: (route) => {
-      hash.value = hashOf(route);
+    retype: (next) => {
+      hash.value = hashOf(next);
       address.replaceSoon(hash.value);
     },
   };

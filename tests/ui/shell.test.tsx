@@ -41,6 +41,11 @@ describe("the frame of every screen", () => {
     expect(place.textContent).not.toContain("Open a show");
   });
 
+  it("marks the place where one is, at the very first start too", async () => {
+    const place = await show(pretendApp(""));
+    expect(place.querySelector("[aria-current]")?.textContent).toBe("Fault");
+  });
+
   it("shows a calculator's answer before the log has been read", async () => {
     const place = await show(pretendApp("#/calculators/distance"), false);
     expect(place.querySelector(".answer")?.textContent).toContain("dB");
