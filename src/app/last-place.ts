@@ -38,9 +38,7 @@ export function followPlace(
   const scrolls = new Map<string, number>();
   const stored = keep.read(SCROLL_KEY)?.split(" ") ?? [];
   if (stored[0] !== undefined) scrolls.set(stored[0], Number(stored[1]) || 0);
-  // A sum keeps its scroll while its fields change.
-  const placeOf = (hash: string): string => hash.split("?")[0] ?? hash;
-  let here = placeOf(navigation.hash.value);
+  let here = navigation.place.value;
   let timer: ReturnType<typeof setTimeout> | undefined;
   const note = (): void => {
     clearTimeout(timer);
@@ -62,10 +60,16 @@ export function followPlace(
     const hash = navigation.hash.value;
     // Opening "mark" marks: it must never be what a restart returns to.
     if (parseHash(hash).place !== "mark") keep.write(PLACE_KEY, hash);
+  });
+  // By place, not by address: a calculator keeps its scroll while its fields change.
+  effect(() => {
+    const next = navigation.place.value;
     if (!isReady.value) return;
-    const next = placeOf(hash);
     clearTimeout(timer);
+    const hasMoved = here !== next;
     here = next;
-    requestAnimationFrame(() => scrollTo(0, scrolls.get(next) ?? 0));
+    const scroll = scrolls.get(next) ?? 0;
+    // At the start the page stands at its top: to scroll there would lay it out for nothing.
+    if (hasMoved || scroll > 0) requestAnimationFrame(() => scrollTo(0, scroll));
   });
 }

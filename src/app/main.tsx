@@ -32,7 +32,8 @@ if (root === null) throw new Error("index.html has no element with the id app");
 render(<Shell models={models} />, root);
 
 effect(() => {
-  document.documentElement.dataset["theme"] = settings.theme.value;
+  const { dataset } = document.documentElement;
+  if (dataset["theme"] !== settings.theme.value) dataset["theme"] = settings.theme.value;
 });
 effect(() => surroundings.keepAwake(fault.openFaults.value.length > 0));
 // An acknowledgement belongs to the screen on which it was given.

@@ -3,7 +3,7 @@ import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { createStaticServer, type Intercept } from "../../scripts/static-server.mjs";
 
-/** A host of the app that a test can change, stop and start again at the same address. */
+/** A host of the app that a test can change and stop. */
 export interface Site {
   readonly url: string;
   /** Paths asked for since the start of the test. */
@@ -12,7 +12,6 @@ export interface Site {
   readonly folder: string;
   /** From now on asked before each answer; see the static server. */
   intercept: Intercept;
-  start(): Promise<void>;
   stop(): Promise<void>;
   /** Replaces everything by another build. */
   publish(folder: string): Promise<void>;
@@ -42,7 +41,6 @@ export async function openSite(built: string): Promise<Site> {
     requests,
     folder,
     intercept: () => false,
-    start: () => server.start(Number(new URL(url).port)),
     stop: () => server.stop(),
     async publish(next) {
       await rm(folder, { recursive: true });

@@ -89,6 +89,23 @@ describe("the static server", () => {
     expect((await fetch(url)).status).toBe(200);
   });
 
+  it("stops although an answer is still under way", async () => {
+    await server.stop();
+    let isAsked = (): void => {};
+    const asked = new Promise<void>((resolve) => {
+      isAsked = resolve;
+    });
+    server = createStaticServer(join(place, "site"), () => {
+      isAsked();
+      return new Promise(() => {});
+    });
+    await server.start(0);
+    const answer = expect(fetch(server.url)).rejects.toThrow();
+    await asked;
+    await server.stop();
+    await answer;
+  });
+
   it("lets whoever asked to answer in its place do so", async () => {
     await server.stop();
     server = createStaticServer(join(place, "site"), (path, response) => {
