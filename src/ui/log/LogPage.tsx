@@ -25,7 +25,7 @@ export function LogPage({ models }: { models: AppModels }) {
   const wording = reportWording(models.expertise.words.value);
   return (
     <div class="stack">
-      <div class="row">
+      <div class="row nowrap">
         <p>
           <strong>{name}</strong>
           {show.place !== "" && <span> · {show.place}</span>}
