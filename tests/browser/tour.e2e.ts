@@ -1,3 +1,5 @@
+import { cp } from "node:fs/promises";
+import { join } from "node:path";
 import { expect, offlineReady, test } from "./fixtures.ts";
 import { answerFirst, dock, goTo, mark, openShow, SHOW, stepTitle, tour } from "./steps.ts";
 
@@ -67,6 +69,24 @@ test("a new browser process starts offline at the place where the user was", asy
   await second.page.goto(site.url);
   await expect(second.page.getByRole("heading", { name: "Rig" })).toBeVisible();
   await expect(second.page.getByRole("link", { name: SHOW.name })).toBeVisible();
+});
+
+test("the app can be installed and works without network from any sub-path", async ({
+  built,
+  site,
+  openBrowser,
+}) => {
+  await cp(built, join(site.folder, "venue", "app"), { recursive: true });
+  const { page } = await openBrowser();
+  await page.goto(`${site.url}/venue/app/`);
+  await offlineReady(page);
+  const devtools = await page.context().newCDPSession(page);
+  const { installabilityErrors } = await devtools.send("Page.getInstallabilityErrors");
+  expect(installabilityErrors).toEqual([]);
+  await site.stop();
+  await page.reload();
+  await mark(page);
+  await expect(stepTitle(page)).toBeVisible();
 });
 
 test("nothing acknowledged is lost when the browser is killed between two taps", async ({
