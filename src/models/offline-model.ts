@@ -5,7 +5,7 @@ import type { JournalModel } from "./journal-model.ts";
 export interface OfflineModel {
   readonly readiness: ReadonlySignal<OfflineState["readiness"]>;
   readonly version: ReadonlySignal<string | null>;
-  /** A new version waits and nothing is going on that it could disturb. */
+  /** A new version waits, or was taken by another window, and there is nothing that it could disturb. */
   readonly canOffer: ReadonlySignal<boolean>;
   readonly isTakenElsewhere: ReadonlySignal<boolean>;
   /** What came of the last look for a new version; null before the first. */
@@ -27,7 +27,7 @@ export function createOfflineModel(offline: Offline, journal: JournalModel): Off
     version: computed(() => state.value.version),
     canOffer: computed(
       () =>
-        state.value.update === "waiting" &&
+        state.value.update !== "none" &&
         journal.phase.value !== "loading" &&
         journal.openShow.value === null,
     ),

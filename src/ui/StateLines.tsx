@@ -35,6 +35,7 @@ export function StateLines({ models }: { models: AppModels }) {
       )}
       {setAside > 0 && <Line text={setAsideText(setAside)} hasLink />}
       {newer > 0 && <Line text={newerText(newer)} />}
+      {offline.isTakenElsewhere.value && <Line text={shellText.takenElsewhere} />}
       {offline.canOffer.value && (
         <div class="line-note">
           <p>{shellText.update}</p>
@@ -43,7 +44,6 @@ export function StateLines({ models }: { models: AppModels }) {
           </button>
         </div>
       )}
-      {offline.isTakenElsewhere.value && <Line text={shellText.takenElsewhere} />}
     </>
   );
 }

@@ -104,11 +104,14 @@ describe("the frame of every screen", () => {
     expect(app.offline.taken).toBe(0);
   });
 
-  it("tells of a version that another window has taken, and changes nothing", async () => {
+  it("tells of a version that another window has taken, and restarts only when asked to", async () => {
     const app = pretendApp();
     const place = await show(app);
     await act(() => app.offline.set({ update: "taken-elsewhere" }));
     expect(place.textContent).toContain("Another window has taken a new version.");
+    expect(app.offline.taken).toBe(0);
+    await press(place, "Restart with the new version");
+    expect(app.offline.taken).toBe(1);
   });
 });
 
