@@ -51,7 +51,8 @@ effect(() => {
 
 offline.start();
 void journal.load();
-void models.expertise.load();
+// Behind the first picture: asking for it takes time that the first tap should not wait for.
+requestAnimationFrame(() => setTimeout(() => void models.expertise.load()));
 void surroundings.loadKept().then(() => {
   restoreAgain();
   const isReady = computed(() => journal.phase.value !== "loading");
