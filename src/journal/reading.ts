@@ -2,7 +2,7 @@ import { isClock } from "./clock.ts";
 import { migrate, type RawRecord } from "./migrations.ts";
 import {
   bodySchema,
-  ENVELOPE,
+  envelopeSchema,
   type JournalRecord,
   RECORD_TYPES,
   RECORD_VERSION,
@@ -35,7 +35,7 @@ function read(raw: unknown): Row {
   const hasVersion = Number.isInteger(v) && (v as number) > 0;
   if (hasVersion && (v as number) > RECORD_VERSION) return { kind: "newer" };
   const lifted = hasVersion ? migrate(raw as RawRecord, v as number) : raw;
-  const envelope = ENVELOPE.safeParse(lifted);
+  const envelope = envelopeSchema().safeParse(lifted);
   if (!envelope.success) return wrongField([], envelope.error.issues);
   const { type, clock } = envelope.data;
   if (!isClock(clock)) return wrongField(["clock"]);

@@ -9,9 +9,6 @@ import * as z from "zod/mini";
 export const RECORD_VERSION = 1;
 
 type Is<T> = (value: unknown) => value is T;
-/** A field that the given question decides: the library's own leaf types would add 1.3 kB to the app. */
-const field = <T>(is: Is<T>) => z.custom<T>(is);
-
 const isText =
   (most: number, least = 0): Is<string> =>
   (value): value is string =>
@@ -36,9 +33,8 @@ const isCarrierMhz: Is<number> = (value): value is number =>
   typeof value === "number" && value >= 25 && value <= 7200;
 
 const isId = isText(64, 1);
-const id = field(isId);
-const NAME = field(isText(120));
-const LONG_TEXT = field(isText(4000));
+const isName = isText(120);
+const isLongText = isText(4000);
 
 /** From which moment of the show something may be done, in rising freedom. */
 export const MOMENTS = ["live", "between", "off-air"] as const;
@@ -61,61 +57,80 @@ export const TRIAL_RESULTS = ["cured", "better", "no-change", "worse"] as const;
 export const ENDINGS = ["cured", "worked-around", "stopped-by-itself", "unsolved"] as const;
 
 const BODIES = {
-  "show.opened": z.object({ name: NAME, place: NAME, timeZone: field(isText(64)) }),
-  "show.edited": z.object({ name: NAME, place: NAME }),
-  "show.closed": z.object({}),
-  "moment.set": z.object({ moment: field(isOneOf(MOMENTS)) }),
-  "link.set": z.object({
-    link: id,
-    name: NAME,
-    kind: field(isOneOf(LINK_KINDS)),
-    frequencyMhz: field(isNullOr(isCarrierMhz)),
-  }),
-  "link.removed": z.object({ link: id }),
-  "fault.opened": z.object({ moment: field(isOneOf(MOMENTS)) }),
-  "dropout.marked": z.object({ fault: id }),
-  "dropout.detailed": z.object({
-    mark: id,
-    links: field(isListOf(isId, 200)),
-    place: field(isNullOr(isOneOf(PLACES))),
-  }),
-  "check.answered": z.object({ fault: id, check: id, outcome: id }),
-  "step.skipped": z.object({ fault: id, step: id }),
-  "remedy.tried": z.object({ fault: id, remedy: id, result: field(isOneOf(TRIAL_RESULTS)) }),
-  "fault.closed": z.object({
-    fault: id,
-    causes: field(isListOf(isId, 4)),
-    ending: field(isOneOf(ENDINGS)),
-    remedy: field(isNullOr(isId)),
-    note: LONG_TEXT,
-  }),
-  "sum.kept": z.object({ calculator: id, query: field(isText(1000)), sentence: LONG_TEXT }),
-  "note.added": z.object({ text: LONG_TEXT }),
-  "record.withdrawn": z.object({ record: id }),
-} as const;
+  "show.opened": { name: isName, place: isName, timeZone: isText(64) },
+  "show.edited": { name: isName, place: isName },
+  "show.closed": {},
+  "moment.set": { moment: isOneOf(MOMENTS) },
+  "link.set": {
+    link: isId,
+    name: isName,
+    kind: isOneOf(LINK_KINDS),
+    frequencyMhz: isNullOr(isCarrierMhz),
+  },
+  "link.removed": { link: isId },
+  "fault.opened": { moment: isOneOf(MOMENTS) },
+  "dropout.marked": { fault: isId },
+  "dropout.detailed": {
+    mark: isId,
+    links: isListOf(isId, 200),
+    place: isNullOr(isOneOf(PLACES)),
+  },
+  "check.answered": { fault: isId, check: isId, outcome: isId },
+  "step.skipped": { fault: isId, step: isId },
+  "remedy.tried": { fault: isId, remedy: isId, result: isOneOf(TRIAL_RESULTS) },
+  "fault.closed": {
+    fault: isId,
+    causes: isListOf(isId, 4),
+    ending: isOneOf(ENDINGS),
+    remedy: isNullOr(isId),
+    note: isLongText,
+  },
+  "sum.kept": { calculator: isId, query: isText(1000), sentence: isLongText },
+  "note.added": { text: isLongText },
+  "record.withdrawn": { record: isId },
+};
+
+/** The part that every record has, whatever its type. */
+const ENVELOPE = {
+  /** UUID version 7: sorts by the time it was made. */
+  id: isId,
+  v: isWhole(1),
+  /** Id of the `show.opened` record of the show it belongs to (its own id on `show.opened`). */
+  show: isId,
+  /** Wall clock of the device that made it. [ms since 1970-01-01 UTC] */
+  at: isWhole(0),
+  device: isId,
+  /** Hybrid logical clock, see clock.ts: merged journals have one order whatever the wall clocks say. */
+  clock: isId,
+  type: isId,
+  body: (_value: unknown): _value is unknown => true,
+};
+
+type Shape = Readonly<Record<string, Is<unknown>>>;
+type Parsed<S extends Shape> = { [K in keyof S]: S[K] extends Is<infer T> ? T : never };
 
 export type RecordType = keyof typeof BODIES;
 export const RECORD_TYPES = Object.keys(BODIES) as RecordType[];
-export const bodySchema = (type: RecordType): z.ZodMiniType => BODIES[type];
 
-/** The part that every record has, whatever its type. */
-export const ENVELOPE = z.object({
-  /** UUID version 7: sorts by the time it was made. */
-  id,
-  v: field(isWhole(1)),
-  /** Id of the `show.opened` record of the show it belongs to (its own id on `show.opened`). */
-  show: id,
-  /** Wall clock of the device that made it. [ms since 1970-01-01 UTC] */
-  at: field(isWhole(0)),
-  device: id,
-  /** Hybrid logical clock, see clock.ts: merged journals have one order whatever the wall clocks say. */
-  clock: id,
-  type: id,
-  body: field((_value): _value is unknown => true),
-});
+const made = new Map<Shape, z.ZodMiniType>();
+/**
+ * Made when the first record is read, not when the app starts. `z.custom` in place of the library's
+ * own leaf types, which would add 1.3 kB to the app.
+ */
+function schemaOf<S extends Shape>(shape: S): z.ZodMiniType<Parsed<S>> {
+  let schema = made.get(shape);
+  if (!schema) {
+    const fields = Object.entries(shape).map(([name, is]) => [name, z.custom(is)]);
+    schema = z.object(Object.fromEntries(fields));
+    made.set(shape, schema);
+  }
+  return schema as z.ZodMiniType<Parsed<S>>;
+}
+export const bodySchema = (type: RecordType): z.ZodMiniType => schemaOf<Shape>(BODIES[type]);
+export const envelopeSchema = (): z.ZodMiniType<Parsed<typeof ENVELOPE>> => schemaOf(ENVELOPE);
 
-type Body<T extends RecordType> = z.infer<(typeof BODIES)[T]>;
-type Envelope = Omit<z.infer<typeof ENVELOPE>, "type" | "body">;
+type Body<T extends RecordType> = Parsed<(typeof BODIES)[T]>;
+type Envelope = Omit<Parsed<typeof ENVELOPE>, "type" | "body">;
 /** A record of one type, or (without an argument) the union of all. */
 export type JournalRecord<T extends RecordType = RecordType> = {
   [K in T]: Envelope & { type: K; body: Body<K> };

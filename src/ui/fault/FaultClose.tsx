@@ -5,6 +5,7 @@ import { Chip } from "../parts/Chip.tsx";
 import { DraftField } from "../parts/DraftField.tsx";
 import * as faultText from "../text/fault.ts";
 import { ENDING_TEXT } from "../text/fault.ts";
+import { noteTooLong } from "../text/log.ts";
 import { FaultGone } from "./FaultGone.tsx";
 
 /** The verdict: how it ended, what it was, what helped. Filled in from the evidence, changed by tap. */
@@ -61,7 +62,7 @@ export function FaultClose({ models }: { models: AppModels }) {
         label={faultText.closeNote}
         draft={model.note}
         lines="some"
-        problem={model.isNoteTooLong.value ? faultText.noteTooLong : null}
+        problem={model.isNoteTooLong.value ? noteTooLong : null}
       />
       <button type="button" class="wide tall" onClick={() => void model.close()}>
         {faultText.closeDo}

@@ -3,7 +3,7 @@ import type { Ending, Moment, StagePlace, TrialResult } from "../../journal/reco
 
 export const title = "Fault";
 export const purpose =
-  "When a microphone, in-ear or beltpack drops out, tap Mark dropout. The time is stored at once; the questions come after it.";
+  "When a microphone, in-ear or beltpack drops out, tap Mark dropout. The time is stored at once; questions come after.";
 export const openShow = "Name the show first";
 export const openFaults = "Open";
 export const closedFaults = "Closed";
@@ -40,8 +40,6 @@ export const closeRemedy = "What helped?";
 export const closeRemedyNone = "Nothing in particular";
 export const closeNote = "Note for the next crew (optional)";
 export const closeDo = "Close the fault";
-export const noteTooLong =
-  "At most 4000 characters. Nothing is lost: shorten the note and close again.";
 export const audioBack = "Audio is back. Close the fault, or keep tracing when there is a pause.";
 export const marksTitle = "Which links, and where?";
 export const marksNoLinks = "Add the show's links under Rig to choose them here.";

@@ -5,8 +5,7 @@ export const share = "Share as text";
 export const note = "Note";
 export const notePlaceholder = "What the next crew should know";
 export const addNote = "Add";
-export const noteTooLong =
-  "At most 4000 characters. Nothing is lost: shorten the note and add it again.";
+export const noteTooLong = "At most 4000 characters. Nothing is lost: shorten the note.";
 export const withdraw = "Take back";
 export const withdrawn = "taken back";
 export const restore = "Restore";

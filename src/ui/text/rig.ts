@@ -1,4 +1,5 @@
 import type { LinkKind } from "../../journal/records.ts";
+import { tooLong } from "./show.ts";
 
 export const title = "Rig";
 export const purpose =
@@ -23,5 +24,5 @@ export const KIND_TEXT: Readonly<Record<LinkKind, string>> = {
 
 export const NAME_PROBLEM_TEXT = {
   "no-name": "Type a name, as it stands on the tape of the receiver.",
-  "name-too-long": "At most 120 characters. Nothing is lost: shorten it and add again.",
+  "name-too-long": tooLong,
 } as const;

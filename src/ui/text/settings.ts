@@ -7,8 +7,7 @@ export const units = "Lengths in";
 export const offline = "Without network";
 export const ready = "Ready without network: everything is stored on this phone.";
 export const preparing = "Getting ready for use without network…";
-export const failed =
-  "Not ready without network: the download did not finish. Try again with a connection.";
+export const failed = "Not ready without network. Try again with a connection.";
 export const unsupported =
   "Can't be made ready for use without network: it takes HTTPS and a browser with service workers.";
 export const version = "Version";

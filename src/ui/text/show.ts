@@ -7,5 +7,5 @@ export const open = "Open the show";
 export const save = "Save";
 export const close = "Close the show";
 export const reopen = "Open it again";
-export const tooLong = "At most 120 characters each. Nothing is lost: shorten it and save again.";
+export const tooLong = "At most 120 characters. Nothing is lost: shorten it.";
 export const earlier = "Earlier shows";
