@@ -105,13 +105,14 @@ export function createCloseModel(
       const text = note.text.value.trim();
       isNoteTooLong.value = text.length > NOTE_LENGTH_MOST;
       if (isNoteTooLong.value) return;
-      const stored = await fault.close({
+      const verdict = {
         causes: cause.value === null ? [] : [cause.value],
         ending: ending.value,
         remedy: remedy.value,
         note: text,
-      });
+      };
       note.clear();
+      const stored = await fault.close(verdict);
       navigation.go({ place: "fault" });
       notices.say({ code: stored ? "stored" : "not-stored" });
     },

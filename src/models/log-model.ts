@@ -62,11 +62,8 @@ export function createLogModel(
       isNoteTooLong.value = text.length > NOTE_LENGTH_MOST;
       const home = show.value;
       if (text === "" || isNoteTooLong.value || home === null) return;
-      const stored = await journal.record((make) =>
-        make({ type: "note.added", body: { text } }, home.id),
-      );
       note.clear();
-      say(stored);
+      say(await journal.record((make) => make({ type: "note.added", body: { text } }, home.id)));
     },
     withdraw: async (record) => {
       const home = show.value;

@@ -79,13 +79,12 @@ export function createRigModel(journal: JournalModel, surroundings: Surroundings
       const form = read();
       if (form === null) return false;
       const link = edited.value ?? surroundings.newId();
-      const stored = await journal.record((make) =>
-        make({ type: "link.set", body: { link, kind: kind.value, ...form } }),
-      );
+      const body = { link, kind: kind.value, ...form };
+      // Before the phone has stored it: what is typed meanwhile belongs to the next link.
       name.clear();
       frequency.clear();
       edited.value = null;
-      return stored;
+      return journal.record((make) => make({ type: "link.set", body }));
     },
     remove: (link) =>
       journal.record((make) => make({ type: "link.removed", body: { link: link.id } })),

@@ -34,13 +34,12 @@ export function createShowModel(journal: JournalModel, surroundings: Surrounding
       const body = { name: name.text.value.trim(), place: place.text.value.trim() };
       isTooLong.value = body.name.length > NAME_LENGTH_MOST || body.place.length > NAME_LENGTH_MOST;
       if (isTooLong.value) return false;
-      const stored = await journal.record((make) => {
+      name.clear();
+      place.clear();
+      return journal.record((make) => {
         if (open.value) make({ type: "show.edited", body });
         else make({ type: "show.opened", body: { ...body, timeZone: surroundings.timeZone() } });
       });
-      name.clear();
-      place.clear();
-      return stored;
     },
     close: () => journal.record((make) => make({ type: "show.closed", body: {} })),
     reopen: async (show) => {
