@@ -31,7 +31,11 @@ export function createShowModel(journal: JournalModel, surroundings: Surrounding
     place,
     isTooLong,
     save: async () => {
-      const body = { name: name.text.value.trim(), place: place.text.value.trim() };
+      // An empty field leaves what the show has: it stands there as the placeholder.
+      const body = {
+        name: name.text.value.trim() || (open.value?.name ?? ""),
+        place: place.text.value.trim() || (open.value?.place ?? ""),
+      };
       isTooLong.value = body.name.length > NAME_LENGTH_MOST || body.place.length > NAME_LENGTH_MOST;
       if (isTooLong.value) return false;
       name.clear();

@@ -32,6 +32,18 @@ describe("forms", () => {
     expect(notes).toEqual(["first", "second"]);
   });
 
+  it("leave the show's name as it is when only its place is typed", async () => {
+    const { models } = pretendApp("#/show");
+    models.show.name.set("Lantern Parade");
+    await models.show.save();
+    models.show.place.set("Old Ropeworks");
+    await models.show.save();
+    expect(models.show.open.value).toMatchObject({
+      name: "Lantern Parade",
+      place: "Old Ropeworks",
+    });
+  });
+
   it("refuse what is too long, and keep it to be shortened", async () => {
     const { models, store } = pretendApp("#/show");
     models.show.name.set("x".repeat(121));
