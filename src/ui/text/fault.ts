@@ -23,7 +23,7 @@ export const noEvidence = "Nothing answered yet moves this one.";
 export const evidenceUnit =
   "Evidence in decibels: +10 dB makes it ten times likelier against the rest.";
 export const otherTitle = "Other steps";
-export const reading = "Reading what the fault finder knows…";
+export const reading = "Reading…";
 export const unread = "What the fault finder knows could not be read. Everything else works.";
 export const readAgain = "Try again";
 export const otherNone = "Nothing else can be done at this moment of the show.";

@@ -14,7 +14,7 @@ export const version = "Version";
 export const check = "Look for a new version";
 export const locked = "A show is open: the version stays as it is until you close the show.";
 export const storage = "Storage";
-export const persistent = "The browser has agreed not to clear the log by itself.";
+export const persistent = "The browser will not clear the log by itself.";
 export const notPersistent =
   "The browser may clear the log when space is short: share it after the show.";
 export const askPersist = "Ask the browser to keep it";
