@@ -20,7 +20,8 @@ export function foldShow(
   const links = new Map<string, LinkView>();
   let { name, place } = opened.body;
   let closedAt: number | null = null;
-  let moment: Moment = "off-air";
+  // Until it is said: the moment that allows least, so that nothing is switched off before an audience.
+  let moment: Moment = "live";
   for (const { id, at, type, body } of standing) {
     if (type === "show.edited") ({ name, place } = body);
     else if (type === "show.closed") closedAt = at;

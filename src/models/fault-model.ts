@@ -81,7 +81,7 @@ export function createFaultModel(parts: {
     }
     return null;
   });
-  const moment = computed<Moment>(() => (traced.value?.show ?? show.value)?.moment ?? "off-air");
+  const moment = computed<Moment>(() => (traced.value?.show ?? show.value)?.moment ?? "live");
   const evidence = computed<Evidence>(() => {
     const fault = traced.value?.fault;
     if (!fault) return NO_EVIDENCE;
@@ -148,7 +148,7 @@ export function createFaultModel(parts: {
         const open = openFaults.value.at(-1);
         fault =
           open?.id ??
-          make({ type: "fault.opened", body: { moment: show.value?.moment ?? "off-air" } }).id;
+          make({ type: "fault.opened", body: { moment: show.value?.moment ?? "live" } }).id;
         marked.count = (open?.marks.length ?? 0) + 1;
         marked.at = make({ type: "dropout.marked", body: { fault } }).at;
       });

@@ -14,6 +14,10 @@ export async function openShow(page: Page): Promise<void> {
   await page.getByLabel("Building or place").fill(SHOW.place);
   await page.getByRole("button", { name: "Open the show" }).click();
   await expect(page.getByRole("link", { name: SHOW.name })).toBeVisible();
+  // A fresh show counts as live; here there is time to ask.
+  await goTo(page, "Fault");
+  await page.getByRole("radio", { name: "Off air" }).check();
+  await page.getByRole("link", { name: SHOW.name }).click();
 }
 
 export async function addLink(page: Page): Promise<void> {

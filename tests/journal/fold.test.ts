@@ -150,7 +150,7 @@ describe("a show", () => {
       timeZone: "Pacific/Auckland",
       openedAt: START_MS,
       closedAt: null,
-      moment: "off-air",
+      moment: "live",
     });
     const edit = add("show.edited", { name: "Late show", place: "Yard" });
     expect(onlyShow(records)).toMatchObject({ name: "Late show", place: "Yard" });

@@ -110,6 +110,15 @@ describe("tracing a fault", () => {
     expect(navigation.route.value).toMatchObject({ place: "trace", step: null });
   });
 
+  it("takes the microphone to be live until it is told otherwise, and saves the show first", async () => {
+    const { fault } = start();
+    await fault.markDropout();
+    expect(fault.moment.value).toBe("live");
+    expect(fault.traced.value?.fault.moment).toBe("live");
+    // First save the show, then learn: common practice, no source.
+    expect(fault.step.value).toEqual({ kind: "remedy", id: "hand-over-spare" });
+  });
+
   it("offers nothing that the moment of the show does not allow", async () => {
     const { fault } = start();
     await fault.markDropout();
